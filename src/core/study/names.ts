@@ -1,0 +1,18 @@
+/** The closed lists of names a study may use, each with what it stands for. */
+
+export const MOBILITY_NAMES = ['klaassen', 'masetti', 'arora', 'caughey-thomas', 'mf723'] as const;
+export type MobilityName = (typeof MOBILITY_NAMES)[number];
+
+/** `universal`: fits of transport moments with the universal potential; `lss1975`: the tables of 1975. */
+export const RANGE_SETS = ['universal', 'lss1975'] as const;
+export type RangeSet = (typeof RANGE_SETS)[number];
+
+/** `fair1981`: intrinsic diffusivities; `fuller1956`: those of heavily doped diffusions. */
+export const DIFFUSIVITY_SETS = ['fair1981', 'fuller1956'] as const;
+export type DiffusivitySet = (typeof DIFFUSIVITY_SETS)[number];
+
+export const TABLE_DELIMITERS = ['tab', 'semicolon', 'comma', 'pipe', 'space'] as const;
+export type TableDelimiter = (typeof TABLE_DELIMITERS)[number];
+
+export const TABLE_ENCODINGS = ['utf-8', 'utf-16le', 'utf-16be', 'windows-1252'] as const;
+export type TableEncoding = (typeof TABLE_ENCODINGS)[number];
