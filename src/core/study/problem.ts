@@ -27,6 +27,13 @@ export class InputProblem extends Error {
   }
 }
 
+/** One problem of a study, for showing beside its field. */
+export interface StudyProblem {
+  /** Path such as `steps[2].energy_keV`; empty for the study as a whole. */
+  key: string;
+  message: string;
+}
+
 /** A well-posed question without an answer (exit code 3): why, and what to change. */
 export class NoSolution extends Error {
   override readonly name = 'NoSolution';
