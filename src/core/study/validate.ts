@@ -99,6 +99,7 @@ function keyOf(path: readonly PropertyKey[]): string {
 
 function shown(value: unknown): string {
   if (value === undefined) return 'nothing';
+  if (typeof value === 'number') return String(value);
   const text = JSON.stringify(value) ?? String(value);
   return text.length > 60 ? `${text.slice(0, 57)}...` : text;
 }

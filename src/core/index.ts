@@ -1,0 +1,36 @@
+/** The public face of the calculation: all that the window and the command line may import. */
+
+export { DOPANT_FACTS, DOPANTS, type Dopant, IMPLANT_SPECIES, type ImplantSpecies } from './material/dopants';
+export { concentrationOf, resistivityOf } from './material/mf723';
+export { MOBILITY_MODELS } from './mobility/list';
+export { uniformSilicon } from './mobility/uniform';
+export { rangeStatistics } from './process/ranges';
+export { csvText } from './report/csv';
+export { type ColumnTable, columnsTable, type RowTable, readingsTable } from './report/tables';
+export type {
+  JunctionResult,
+  LayerResult,
+  MeasurementResult,
+  ResultDocument,
+  Solution,
+  SolvedColumns,
+  StepResult,
+} from './result';
+export { type SolveOptions, solve } from './solve';
+export { sha256Hex } from './study/hash';
+export {
+  DIFFUSIVITY_SETS,
+  MOBILITY_NAMES,
+  RANGE_SETS,
+  TABLE_DELIMITERS,
+  TABLE_ENCODINGS,
+} from './study/names';
+export { InputProblem, NoSolution, type StudyProblem, type Warning } from './study/problem';
+export { formatQuantity, parseQuantity } from './study/quantity';
+export { resolveTables, safeTableName } from './study/resolveTables';
+export type { Measurement, Study, StudyStep, StudyStepKind, TableChoice } from './study/schema';
+export { embedTable } from './study/table/embed';
+export { readTable } from './study/table/read';
+export { parseStudy, studyProblems, validateStudy } from './study/validate';
+export { studyJsonSchema, writeStudy } from './study/write';
+export { PROGRAM_VERSION } from './version';

@@ -1,0 +1,90 @@
+/**
+ * Layers between junctions and what a sheet measurement reads of each.
+ *
+ * Sheet conductance G = q Int (n mu_n + p mu_p) dx, sheet resistance 1/G. Hall averages of the majority carriers (density c,
+ * mobility mu): dose (Int c mu)^2 / Int c mu^2, mobility Int c mu^2 / Int c mu, Hall factor 1: the two-layer-network
+ * average of R. L. Petritz, Phys. Rev. 110, 1254 (1958) taken to a continuum (from memory).
+ */
+
+import { ELEMENTARY_CHARGE } from '../material/constants';
+import { integrate } from '../numeric/simpson';
+import type { ActiveDoping, Conduction } from './conduction';
+
+/** Positions of a layer's first and last node; both are cell ends. */
+export interface LayerSpan {
+  readonly from: number;
+  readonly to: number;
+  readonly type: 'n' | 'p';
+}
+
+/** Readings of one layer: cm, cm^-2, cm^-3, S, cm^2/Vs. */
+export interface LayerReadings {
+  readonly sheetConductance: number;
+  readonly netDose: number;
+  readonly carrierDose: number;
+  readonly conductivityMobility: number;
+  readonly hallMobility: number;
+  readonly hallDose: number;
+  readonly surfaceNet: number;
+  readonly peakNet: number;
+  readonly peakDepth: number;
+}
+
+/** The layers from the surface down, cut at the junctions (positions of nodes). */
+export function layerSpans(doping: ActiveDoping, junctions: readonly number[]): LayerSpan[] {
+  const bounds = [0, ...junctions, doping.depth.length - 1];
+  return bounds.slice(1).map((to, i) => {
+    const from = bounds[i];
+    return { from, to, type: doping.net[from + 1] > 0 ? 'n' : 'p' };
+  });
+}
+
+/** Sheet conductance of one layer, S. */
+export function sheetConductance(depth: Float64Array, conductivity: Float64Array, span: LayerSpan): number {
+  return integrate(depth, conductivity, span.from, span.to);
+}
+
+/** All readings of one layer. */
+export function layerReadings(doping: ActiveDoping, flow: Conduction, span: LayerSpan): LayerReadings {
+  const { from, to, type } = span;
+  const carriers = type === 'n' ? flow.input.electrons : flow.input.holes;
+  const mobility = type === 'n' ? flow.electronMobility : flow.holeMobility;
+  const work = new Float64Array(doping.depth.length);
+  const total = (value: (i: number) => number): number => {
+    for (let i = from; i <= to; i++) work[i] = value(i);
+    return integrate(doping.depth, work, from, to);
+  };
+  const conductance = sheetConductance(doping.depth, flow.conductivity, span);
+  const carrierDose = total((i) => carriers[i]);
+  const drift = total((i) => carriers[i] * mobility[i]);
+  const hall = total((i) => carriers[i] * mobility[i] * mobility[i]);
+  return {
+    sheetConductance: conductance,
+    netDose: total((i) => Math.abs(doping.net[i])),
+    carrierDose,
+    conductivityMobility: conductance / (ELEMENTARY_CHARGE * carrierDose),
+    hallMobility: hall / drift,
+    hallDose: (drift * drift) / hall,
+    surfaceNet: Math.abs(doping.net[from]),
+    ...peak(doping, span),
+  };
+}
+
+/** The largest net doping of the layer and its depth, by the parabola of ln|net| through the three highest nodes. */
+function peak({ depth, net }: ActiveDoping, { from, to }: LayerSpan): { peakNet: number; peakDepth: number } {
+  let top = from;
+  for (let i = from; i <= to; i++) if (Math.abs(net[i]) > Math.abs(net[top])) top = i;
+  const node = { peakNet: Math.abs(net[top]), peakDepth: depth[top] };
+  if (top <= from || top >= to || net[top - 1] === 0 || net[top + 1] === 0) return node;
+  const [a, b, c] = [top - 1, top, top + 1].map((i) => Math.log(Math.abs(net[i])));
+  const [ha, hc] = [depth[top] - depth[top - 1], depth[top + 1] - depth[top]];
+  const slopeBefore = (b - a) / ha;
+  const slopeAfter = (c - b) / hc;
+  const bend = (2 * (slopeAfter - slopeBefore)) / (ha + hc);
+  if (!(bend < 0)) return node;
+  const slope = (slopeBefore * hc + slopeAfter * ha) / (ha + hc);
+  return {
+    peakNet: Math.exp(b - (slope * slope) / (2 * bend)),
+    peakDepth: depth[top] - slope / bend,
+  };
+}
