@@ -22,6 +22,8 @@ export type ExportKind = 'csv' | 'json' | 'svg' | 'png';
 export type MenuCommand =
   | 'newStudy'
   | 'open'
+  /** A study was given to a second start of the program: ask for it with `initialStudy`, after the question about unsaved work. */
+  | 'openGiven'
   | 'save'
   | 'saveAs'
   | 'importTable'
@@ -48,7 +50,7 @@ export interface RuntimeFacts {
 export interface Bridge {
   /** Open dialog for a study; null when the user cancels. */
   openStudy(): Promise<Outcome<OpenedDocument | null>>;
-  /** A study given on the program's command line or to a second start, if any (asked once at start). */
+  /** A study given on the program's command line or to a second start, if any; each is given once. */
   initialStudy(): Promise<Outcome<OpenedDocument | null>>;
   /** Saves to the document's own file, or asks for a place when `id` is null or `as` is set; null when cancelled. */
   saveStudy(request: {
