@@ -44,6 +44,8 @@ export interface MobilityModel {
   readonly source: string;
   /** What the published argument is: carriers or dopants. */
   readonly argument: string;
+  /** What is known to be wrong with the model even inside its range. */
+  readonly caution?: string;
   /** Published ranges; outside them the value is still given, with a warning. cm^-3, K. */
   readonly range: {
     readonly concentration: readonly [number, number];
