@@ -40,8 +40,8 @@ function concentrationWarnings(model: MobilityModel, input: MobilityInput): Warn
 function temperatureWarnings(model: MobilityModel, temperature: number): Warning[] {
   const [lowest, highest] = model.range.temperature;
   if (temperature >= lowest && temperature <= highest) return [];
-  const found = celsius(temperature);
-  const [from, to] = [celsius(lowest), celsius(highest)];
+  const found = celsius(temperature, 1);
+  const [from, to] = [celsius(lowest, 0), celsius(highest, 0)];
   const message = model.dependsOnTemperature
     ? `${found} C is outside the range of ${model.title} (${from} to ${to} C).`
     : `${model.title} gives the mobility at room temperature (${from} to ${to} C), not at ${found} C: its values do not change with temperature.`;
@@ -67,6 +67,6 @@ function scientific(value: number): string {
   return Number(value.toPrecision(4)).toExponential().replace('e+', 'e');
 }
 
-function celsius(temperature: number): string {
-  return `${Number((temperature - ZERO_CELSIUS).toFixed(1))}`;
+function celsius(temperature: number, digits: number): number {
+  return Number((temperature - ZERO_CELSIUS).toFixed(digits));
 }
