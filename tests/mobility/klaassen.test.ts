@@ -1,8 +1,10 @@
+import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { arora } from '../../src/core/mobility/arora';
 import { klaassen } from '../../src/core/mobility/klaassen';
 import { masetti } from '../../src/core/mobility/masetti';
 import { deviation, majority, oneDepth } from './oneDepth';
+import { plainKlaassen } from './plainKlaassen';
 
 const BARE_FIT = {
   phosphorus: { muMax: 1414, muMin: 68.5, nRef: 9.2e16, alpha: 0.711 },
@@ -143,6 +145,23 @@ describe("Klaassen's model", () => {
     expect(weight(1.6e20)).toBeCloseTo(0.08, 3);
     expect(deviation(weight(5e20), weight(1.6e20))).toBeLessThan(1e-6);
     expect(weight(1.2e20)).toBeGreaterThan(weight(1.6e20) * 1.001);
+  });
+
+  test('agrees with the same equations written plainly, for any doping, carriers and temperature', () => {
+    // 1e-11: some thirty rounded operations, and G is a small difference.
+    const power = (min: number, max: number) => fc.double({ min, max, noNaN: true }).map((x) => 10 ** x);
+    const temperatures = fc.double({ min: 77, max: 500, noNaN: true });
+    const columns = fc.tuple(power(13, 21), power(13, 21), power(3, 21), power(3, 21));
+    fc.assert(
+      fc.property(columns, temperatures, ([phosphorus, boron, n, p], temperature) => {
+        const depth = { dopants: { phosphorus, boron }, electrons: n, holes: p, temperature };
+        const at = oneDepth(klaassen, depth);
+        const plain = (carrier: 'electrons' | 'holes') =>
+          plainKlaassen(carrier, phosphorus, boron, n, p, temperature);
+        expect(deviation(at.electrons, plain('electrons'))).toBeLessThan(1e-11);
+        expect(deviation(at.holes, plain('holes'))).toBeLessThan(1e-11);
+      }),
+    );
   });
 
   test('follows Arora from 300 to 500 K at 1e16, where both describe mostly the lattice', () => {
