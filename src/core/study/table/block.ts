@@ -51,18 +51,23 @@ interface Run {
   last: number;
   width: number;
   rows: number;
+  /** Sum over the rows of the share of fields that are no words. */
+  values: number;
 }
-const NO_RUN: Run = { first: 0, last: -1, width: 0, rows: 0 };
+const NO_RUN: Run = { first: 0, last: -1, width: 0, rows: 0, values: 0 };
 
-/** The delimiter under which most lines of a sample are rows of one width; ties go in the order of the list. */
+/**
+ * The delimiter under which most lines of a sample are rows of one width, each counted by its share of fields that are values:
+ * a wrong delimiter leaves words behind. Ties go in the order of the list.
+ */
 function likeliestDelimiter(lines: Lines, skip: number): TableDelimiter | undefined {
   const end = Math.min(lines.count, skip + SAMPLE);
   let best: TableDelimiter | undefined;
   let most = 0;
   for (const delimiter of TABLE_DELIMITERS) {
-    const rows = runsOfRows(lines, delimiter, skip, end).reduce((top, run) => Math.max(top, run.rows), 0);
-    if (rows > most) {
-      most = rows;
+    const values = runsOfRows(lines, delimiter, skip, end).reduce((top, run) => Math.max(top, run.values), 0);
+    if (values > most) {
+      most = values;
       best = delimiter;
     }
   }
@@ -83,18 +88,16 @@ function runsOfRows(lines: Lines, delimiter: TableDelimiter, from: number, to: n
     const line = lines.at(i);
     if (commentOf(line, delimiter) !== undefined) continue;
     const fields = fieldsOf(line, delimiter);
-    const kind = rowKind(fields);
+    const { kind, values } = rowKind(fields);
     if (kind === 'row') {
-      if (!run) run = { first: i, last: i, width: fields.length, rows: 1 };
+      if (!run) run = newRun(i, fields.length, values);
       else if (fields.length === run.width) {
-        run.last = i;
-        run.rows++;
+        extend(run, i, values);
         rival = undefined;
       } else if (rival?.width === fields.length) {
-        rival.last = i;
-        rival.rows++;
+        extend(rival, i, values);
         if (rival.rows >= FEWEST_ROWS || run.rows < FEWEST_ROWS) close();
-      } else rival = { first: i, last: i, width: fields.length, rows: 1 };
+      } else rival = newRun(i, fields.length, values);
     } else if (kind === 'text' && run) {
       close();
       close();
@@ -105,21 +108,32 @@ function runsOfRows(lines: Lines, delimiter: TableDelimiter, from: number, to: n
   return runs;
 }
 
+function newRun(line: number, width: number, values: number): Run {
+  return { first: line, last: line, width, rows: 1, values };
+}
+
+function extend(run: Run, line: number, values: number): void {
+  run.last = line;
+  run.rows++;
+  run.values += values;
+}
+
 /** `row`: two or more values of which one is a number, or one number among blanks; `damaged`: a number among words. */
-function rowKind(fields: readonly string[]): 'row' | 'damaged' | 'text' | 'blank' {
+function rowKind(fields: readonly string[]): { kind: 'row' | 'damaged' | 'text' | 'blank'; values: number } {
   let numbers = 0;
-  let values = 0;
+  let marks = 0;
   let words = 0;
   for (const field of fields) {
     if (field === '') continue;
     if (looksNumeric(field)) numbers++;
     else if (wordOf(field) === 'text') words++;
-    else values++;
+    else marks++;
   }
-  if (numbers + values + words === 0) return 'blank';
-  if (numbers === 0) return words === 0 ? 'damaged' : 'text';
-  if (fields.length < 2) return 'damaged';
-  return numbers + values >= 2 || words === 0 ? 'row' : 'damaged';
+  const values = 1 - words / fields.length;
+  if (numbers + marks + words === 0) return { kind: 'blank', values };
+  if (numbers === 0) return { kind: words === 0 ? 'damaged' : 'text', values };
+  const enough = fields.length >= 2 && (numbers + marks >= 2 || words === 0);
+  return { kind: enough ? 'row' : 'damaged', values };
 }
 
 /** Rows may end in blank fields that the heading lacks: the width that carries anything in the first rows. */

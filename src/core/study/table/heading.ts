@@ -67,7 +67,7 @@ function headingRows(lines: Lines, block: Block, width: number, skip: number): s
   const rows: string[][] = [];
   for (const line of joinQuoted(above).reverse()) {
     const text = plainText(line, block.delimiter);
-    if (/^[-=_+| \t]*$/.test(text)) continue;
+    if (/^[-=_+|;, \t]*$/.test(text)) continue;
     const fields = headingFields(text, block.delimiter, width);
     if (!fields || rows.length === 3) break;
     rows.push(fields);
