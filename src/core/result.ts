@@ -2,8 +2,8 @@
 
 import type { Dopant } from './material/dopants';
 import type { MobilityName } from './study/names';
-import type { ActivationChoice } from './study/recipe';
 import type { Warning } from './study/problem';
+import type { ActivationChoice } from './study/recipe';
 
 export const RESULT_FORMAT = 'ohmstrata-result/1';
 

@@ -1,6 +1,7 @@
 /** The chain from a study to its readings: recipe, profile on a mesh, carriers, mobility, sheet. */
 
 import { type BuiltParts, buildColumns, buildResult } from './buildResult';
+import { intrinsicWarnings } from './carriers/warnings';
 import { mobilityModel } from './mobility/list';
 import { mobilityWarnings } from './mobility/warnings';
 import { runRecipe } from './process/runRecipe';
@@ -44,7 +45,11 @@ export function solve(study: Study, options: SolveOptions = {}): Solution {
     spans,
     readings: spans.map((span) => layerReadings(doping, flow, span)),
     coefficients: temperatureCoefficients(doping, model, recipe.temperature, spans),
-    warnings: [...process.warnings, ...mobilityWarnings(model, flow.input)],
+    warnings: [
+      ...process.warnings,
+      ...intrinsicWarnings(recipe.temperature),
+      ...mobilityWarnings(model, flow.input),
+    ],
   };
   return { result: buildResult(parts), columns: buildColumns(parts) };
 }
