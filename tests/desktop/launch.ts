@@ -130,5 +130,7 @@ export async function launch({ args, userData }: LaunchOptions = {}): Promise<De
   });
   const desktop = new Desktop(app, await app.firstWindow(), folder);
   await desktop.page.waitForFunction(() => document.body.textContent?.trim() !== '');
+  // Without a window manager the page has the keyboard, which copying to the clipboard needs, only once it is clicked.
+  await desktop.page.mouse.click(1, 1);
   return desktop;
 }

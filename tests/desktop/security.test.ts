@@ -158,7 +158,6 @@ test('permissions are denied, but for writing to the clipboard', async () => {
 });
 
 test('a text can be copied to the clipboard', async () => {
-  await desktop.page.bringToFront();
   await desktop.page.evaluate(() => navigator.clipboard.writeText('1473.2 ohm/sq'));
   expect(await desktop.app.evaluate(async ({ clipboard }) => await clipboard.readText())).toBe(
     '1473.2 ohm/sq',
