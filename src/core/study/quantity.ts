@@ -46,7 +46,7 @@ function example({ shown, kind }: Field): string {
   return `type a number in ${shown}, or with one of the units ${unitNames(kind).join(', ')}`;
 }
 
-const NUMBER = /(?:\d+(?:[.,]\d*)*|[.,]\d+)(?:[eEdD][+-]?\d+|\*10\^\(?[+-]?\d+\)?)?/y;
+const NUMBER = /(?:\d+(?:[.,]\d*)*|[.,]\d+)(?:[eEdD][+-]?\d+| ?[xX*] ?10\^\(?[+-]?\d+\)?)?/y;
 
 /** Recursive descent: sum = product {(+|-) product}; product = factor {(*|/) factor}; factor = sign, number or brackets, then a unit. */
 class Parser {
@@ -78,7 +78,10 @@ class Parser {
       if ((left.unit === undefined) !== (right.unit === undefined))
         throw new Refusal('give the unit of every part of a sum, or of none');
       refuseTemperature(left, right);
-      left = { value: sign === '-' ? left.value - right.value : left.value + right.value, unit: left.unit };
+      left = {
+        value: tidy(sign === '-' ? left.value - right.value : left.value + right.value),
+        unit: left.unit,
+      };
     }
   }
 
@@ -92,7 +95,7 @@ class Parser {
         throw new Refusal('only one part of a product may carry a unit, and none may stand below a division');
       refuseTemperature(left, right);
       const value = sign === '*' ? left.value * right.value : left.value / right.value;
-      left = { value, unit: left.unit ?? right.unit };
+      left = { value: tidy(value), unit: left.unit ?? right.unit };
     }
   }
 
@@ -140,7 +143,7 @@ class Parser {
       throw new Refusal(`${unit.name} is no unit of this field; ${example(this.field)}`);
     if (term.unit) throw new Refusal('a unit stands both inside and behind the brackets; give one');
     this.at += length;
-    return { value: convert(term.value, unit, this.shown), unit };
+    return { value: unit === this.shown ? term.value : tidy(convert(term.value, unit, this.shown)), unit };
   }
 
   private startsNumber(): boolean {
@@ -161,6 +164,11 @@ class Parser {
   }
 }
 
+/** Removes what binary fractions leave behind: 0.1 + 0.02 is 0.12. A number typed as it is keeps all its digits. */
+function tidy(value: number): number {
+  return Number(value.toPrecision(15));
+}
+
 function refuseTemperature(...terms: Term[]): void {
   if (terms.some((term) => term.unit?.kind === 'temperature'))
     throw new Refusal(
@@ -169,7 +177,7 @@ function refuseTemperature(...terms: Term[]): void {
 }
 
 function numberOf(text: string): number {
-  const [digits, exponent = '0'] = text.split(/[eEdD]|\*10\^/);
+  const [digits, exponent = '0'] = text.split(/[eEdD]| ?[xX*] ?10\^/);
   const signs = digits.replace(/\d/g, '');
   if (signs.length > 1)
     throw new Refusal(

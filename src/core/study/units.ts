@@ -96,7 +96,10 @@ function superscript(run: string): string {
 }
 
 const WHOLE = UNITS.map((entry) => new RegExp(`^(?:${entry.spelling})$`, 'i'));
-const STARTING = UNITS.map((entry) => new RegExp(`(?:${entry.spelling})(?![a-z0-9])`, 'iy'));
+/** A unit ends where no letter or digit follows; a time may run on, as in `1h30min`. */
+const STARTING = UNITS.map(
+  ({ spelling, kind }) => new RegExp(`(?:${spelling})(?![a-z${kind === 'time' ? '' : '0-9'}])`, 'iy'),
+);
 
 /** The unit that a text as a whole spells, of one of the kinds asked for. */
 export function unitOf(text: string, kinds: readonly QuantityKind[]): Unit | undefined {

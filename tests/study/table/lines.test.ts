@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { MAX_LINE_LENGTH, splitLines } from '../../../src/core/study/table/lines';
+import { MAX_LINE_LENGTH, MAX_TABLE_ROWS, splitLines } from '../../../src/core/study/table/lines';
 
 const all = (text: string) => {
   const lines = splitLines(text);
@@ -29,5 +29,10 @@ describe('splitLines', () => {
     } catch (error) {
       expect((error as { oneLine: string }).oneLine).toMatch(/^t\.csv: line 2: /);
     }
+  });
+
+  test('refuses more lines than can be a profile', () => {
+    expect(splitLines('\n'.repeat(MAX_TABLE_ROWS)).count).toBe(MAX_TABLE_ROWS);
+    expect(() => splitLines('\n'.repeat(MAX_TABLE_ROWS + 1))).toThrow('at most 5000000 lines');
   });
 });

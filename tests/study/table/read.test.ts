@@ -334,6 +334,18 @@ describe('readTable: what it refuses, with file, line and what is allowed', () =
   });
 });
 
+describe('a table of a million rows', () => {
+  test('is read whole, and bytes beyond the limit are refused before they are looked at', () => {
+    const rows = ['Depth (nm),B (cm-3),As (cm-3)'];
+    for (let i = 0; i < 1_000_000; i++)
+      rows.push(`${(i * 0.0015).toFixed(4)},${1e18 + i * 1e12},${2e20 - i * 1e13}`);
+    const reading = read(rows.join('\n'));
+    expect(reading.profiles.map((p) => p.depth_um.length)).toEqual([1_000_000, 1_000_000]);
+    expect(reading.profiles[1].concentration_cm3[999_999]).toBe(2e20 - 999_999 * 1e13);
+    expect(problem(() => readTable(new Uint8Array(512_000_001)))).toContain('at most 512000000 are read');
+  }, 60_000);
+});
+
 describe('a table written in any dialect', () => {
   const SIGNS: Record<TableDelimiter, string> = {
     tab: '\t',
