@@ -1,17 +1,15 @@
 /** How people write units: every spelling that is understood, in one place for typed quantities and table headings alike. */
 
-export const QUANTITY_KINDS = [
-  'length',
-  'concentration',
-  'dose',
-  'energy',
-  'temperature',
-  'time',
-  'resistivity',
-  'sheetResistance',
-  'plain',
-] as const;
-export type QuantityKind = (typeof QUANTITY_KINDS)[number];
+export type QuantityKind =
+  | 'length'
+  | 'concentration'
+  | 'dose'
+  | 'energy'
+  | 'temperature'
+  | 'time'
+  | 'resistivity'
+  | 'sheetResistance'
+  | 'plain';
 
 export interface Unit {
   /** The spelling that is shown. */

@@ -68,7 +68,7 @@ describe('words in place of numbers', () => {
   test('missing values and limits of detection are told apart from text', () => {
     for (const text of ['', 'NaN', 'n/a', 'NA', '-', '--', 'null']) expect(wordOf(text)).toBe('missing');
     for (const text of ['<1e14', '< 1,5E+14', '≤1e14', 'BDL', 'n.d.']) expect(wordOf(text)).toBe('below');
-    for (const text of ['abc', '<', '1e', 'Infinity']) expect(wordOf(text)).toBe('text');
+    for (const text of ['abc', '<', '<abc>', '1e', 'Infinity']) expect(wordOf(text)).toBe('text');
   });
 
   test('a limit looks like a number, a word does not', () => {

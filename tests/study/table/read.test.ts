@@ -102,6 +102,19 @@ describe('readTable: what it reads', () => {
     expect(reading.warnings).toEqual([]);
   });
 
+  test('does not mistake a line of the preamble for names over the columns', () => {
+    const reading = read('Operator;Crater\nDepth (nm);B\n1,5;1e18\n2,5;2e18\n3,5;3e18\n', {
+      concentrationUnit: 'cm-3',
+    });
+    expect(reading.columns.map((c) => c.heading)).toEqual(['Depth (nm)', 'B']);
+  });
+
+  test('stands a heading as long as a line may be', () => {
+    const reading = read(`Depth (nm),B (${'x'.repeat(9900)}\n1,1e18\n2,2e18\n3,3e18\n`);
+    expect(reading.columns[1].heading).toHaveLength(200);
+    expect(reading.questions.map((q) => q.kind)).toEqual(['concentrationUnit']);
+  });
+
   test('leaves matrix signals, times and counts out of the profiles', () => {
     const reading = read(
       'Time (s),Depth (nm),30Si (c/s),31P (1/cm3),Cycle\n1,1,5000,1e18,1\n2,2,5000,2e18,2\n3,3,5001,3e18,3\n',

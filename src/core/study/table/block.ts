@@ -136,6 +136,11 @@ function rowKind(fields: readonly string[]): { kind: 'row' | 'damaged' | 'text' 
   return { kind: enough ? 'row' : 'damaged', values };
 }
 
+/** Whether a line belongs to another run of rows of the same text. */
+export function inOtherRun(block: Block, line: number): boolean {
+  return block.others.some(({ first, last }) => line >= first && line <= last);
+}
+
 /** Rows may end in blank fields that the heading lacks: the width that carries anything in the first rows. */
 export function filledWidth(lines: Lines, block: Block): number {
   let width = 0;

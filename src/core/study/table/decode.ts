@@ -5,7 +5,7 @@ import { InputProblem } from '../problem';
 import type { TableWarning } from './reading';
 
 /** Largest table read, bytes: just below the longest string the runtimes can hold. */
-export const MAX_TABLE_BYTES = 512_000_000;
+const MAX_TABLE_BYTES = 512_000_000;
 
 export interface DecodedText {
   text: string;

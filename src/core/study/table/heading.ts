@@ -2,7 +2,8 @@
 
 import type { TableDelimiter } from '../names';
 import { type QuantityKind, type Unit, unitOf } from '../units';
-import type { Block } from './block';
+import { type Block, inOtherRun } from './block';
+import { dopantNamed } from './dopantNames';
 import { commentOf, fieldsOf, filledLength } from './fields';
 import type { Lines } from './lines';
 import { looksNumeric, wordOf } from './numbers';
@@ -28,6 +29,7 @@ const TABLE_UNITS: readonly QuantityKind[] = ['length', 'concentration'];
 /** Lines kept as metadata, and lines above the numbers in which headings are looked for. */
 const METADATA_LINES = 200;
 const HEADING_LINES = 30;
+const LONGEST_HEADING = 200;
 /** Lines over which a quoted heading may stretch. */
 const QUOTED_LINES = 10;
 
@@ -36,11 +38,12 @@ export function readHead(lines: Lines, block: Block, width: number, skip: number
   const metadata: string[] = [];
   for (let i = skip; i < block.first && metadata.length < METADATA_LINES; i++) {
     const text = plainText(lines.at(i), block.delimiter);
-    if (text !== '') metadata.push(text);
+    if (text !== '' && !inOtherRun(block, i)) metadata.push(text);
   }
   const rows = headingRows(lines, block, width, skip);
   const unitRow = rows.length > 0 && isUnitRow(rows[0]) ? rows.shift() : undefined;
-  const [names, groups] = rows;
+  const [names, above] = rows;
+  const groups = above?.some(dopantNamed) ? above : undefined;
   const headings = Array.from({ length: width }, (_, i): Heading => {
     const text = names?.[i] ?? '';
     const heading = splitHeading(text);
@@ -70,7 +73,7 @@ function headingRows(lines: Lines, block: Block, width: number, skip: number): s
     if (/^[-=_+|;, \t]*$/.test(text)) continue;
     const fields = headingFields(text, block.delimiter, width);
     if (!fields || rows.length === 3) break;
-    rows.push(fields);
+    rows.push(fields.map((field) => field.slice(0, LONGEST_HEADING)));
     if (rows.length === 1 && !isUnitRow(fields) && fields.every((field) => splitHeading(field).unit)) break;
   }
   return rows;

@@ -41,7 +41,7 @@ function finite(value: number): number {
 }
 
 const MISSING = /^(?:nan|n\/a|na|#n\/a|null|none|-{1,3})?$/i;
-const BELOW = /^(?:[<\u2264]\s*\S.*|bdl|b\.d\.l\.?|n\.?d\.?)$/i;
+const BELOW = /^(?:[<\u2264]\s*[\d.,].*|bdl|b\.d\.l\.?|n\.?d\.?)$/i;
 
 /** What a field that is no number says. */
 export function wordOf(field: string): 'missing' | 'below' | 'text' {

@@ -2,13 +2,13 @@
 
 import { InputProblem } from '../problem';
 import type { TableChoice } from '../schema';
-import { type Block, filledWidth, findBlock } from './block';
+import { type Block, filledWidth, findBlock, inOtherRun } from './block';
 import { type DecimalEvidence, type Sighting, weighDecimal } from './decimal';
 import { decodeTable } from './decode';
 import { commentOf, fieldsOf } from './fields';
 import { readHead } from './heading';
 import { type Lines, splitLines } from './lines';
-import { type DecimalSign, looksNumeric, parseNumber, wordOf } from './numbers';
+import { type DecimalSign, looksNumeric, parseNumber } from './numbers';
 import { cleanProfile } from './profile';
 import type { ColumnChoice, TableProfile, TableQuestion, TableReading, TableWarning } from './reading';
 import { assignRoles, type Pair, type Roles } from './roles';
@@ -196,7 +196,7 @@ function foot(lines: Lines, block: Block): string[] {
   const texts: string[] = [];
   for (let i = block.last + 1; i < lines.count && texts.length < PREVIEW_ROWS; i++) {
     const text = lines.at(i).trim();
-    if (text !== '') texts.push(text);
+    if (text !== '' && !inOtherRun(block, i)) texts.push(text);
   }
   return texts;
 }
@@ -211,8 +211,7 @@ function preview(lines: Lines, block: Block, width: number, evidence: DecimalEvi
       fieldsOf(line, block.delimiter)
         .slice(0, width)
         .map((field) => {
-          const value =
-            decimal && wordOf(field) === 'text' ? parseNumber(field, decimal, otherGroups) : Number.NaN;
+          const value = decimal ? parseNumber(field, decimal, otherGroups) : Number.NaN;
           return Number.isNaN(value) ? field : String(value);
         }),
     );

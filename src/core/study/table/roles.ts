@@ -6,8 +6,8 @@ import { dopantNamed } from './dopantNames';
 import type { Heading } from './heading';
 import type { ColumnChoice, TableColumn, TableQuestion, TableWarning } from './reading';
 
-export const DEPTH_UNITS = ['nm', 'um', 'A', 'cm'] as const;
-export const CONCENTRATION_UNITS = ['cm-3', 'm-3'] as const;
+const DEPTH_UNITS = ['nm', 'um', 'A', 'cm'] as const;
+const CONCENTRATION_UNITS = ['cm-3', 'm-3'] as const;
 
 export interface Pair {
   depth: number;
