@@ -195,7 +195,7 @@ export const LSS_TABLES: {
 };
 
 /** Fits of the Thomas-Fermi moments in silicon, 5 to 500 keV. */
-export const LSS_MOMENTS: Partial<Record<Dopant, RangeFit>> = {
+export const LSS_MOMENTS: Record<Dopant, RangeFit> = {
   boron: {
     projectedRange: [-5.18638, 0.382587, 0.262382, -0.0449338, 0.00233054],
     straggle: [-5.53283, 0.324337, 0.239299, -0.0510487, 0.00294067],
