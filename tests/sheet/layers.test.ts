@@ -175,3 +175,11 @@ describe('the temperature coefficient', () => {
     ]);
   });
 });
+
+test('the peak of a flat layer is at its top, not where rounding puts it', () => {
+  const base = (x: number) => (x < 0.5 * UM ? 1e18 : 1e18 * Math.exp(-(((x - 0.5 * UM) / (0.05 * UM)) ** 2)));
+  const [top, substrate] = readings(dopingOf(() => 1e15, base, 525 * UM, [0.5 * UM]));
+  expect(top.peakDepth).toBe(0);
+  expect(substrate.peakDepth).toBeLessThan(2 * UM);
+  expect(substrate.peakNet).toBeCloseTo(1e15, -7);
+});

@@ -10,6 +10,9 @@ import { ELEMENTARY_CHARGE } from '../material/constants';
 import { integrate } from '../numeric/simpson';
 import type { ActiveDoping, Conduction } from './conduction';
 
+/** Where a layer is flat to rounding, its peak is the shallowest depth: later nodes must be higher by this factor. */
+const FLAT = 1 + 1e-9;
+
 /** Positions of a layer's first and last node; both are cell ends. */
 export interface LayerSpan {
   readonly from: number;
@@ -73,7 +76,7 @@ export function layerReadings(doping: ActiveDoping, flow: Conduction, span: Laye
 /** The largest net doping of the layer and its depth, by the parabola of ln|net| through the three highest nodes. */
 function peak({ depth, net }: ActiveDoping, { from, to }: LayerSpan): { peakNet: number; peakDepth: number } {
   let top = from;
-  for (let i = from; i <= to; i++) if (Math.abs(net[i]) > Math.abs(net[top])) top = i;
+  for (let i = from; i <= to; i++) if (Math.abs(net[i]) > Math.abs(net[top]) * FLAT) top = i;
   const node = { peakNet: Math.abs(net[top]), peakDepth: depth[top] };
   if (top <= from || top >= to || net[top - 1] === 0 || net[top + 1] === 0) return node;
   const [a, b, c] = [top - 1, top, top + 1].map((i) => Math.log(Math.abs(net[i])));
