@@ -41,7 +41,9 @@ export class MainWindow {
     window.once('ready-to-show', () => window.show());
     window.on('page-title-updated', (event) => event.preventDefault());
     window.on('close', (event) => this.closing.onClose(event));
-    window.webContents.on('render-process-gone', () => void this.#offerReload());
+    window.webContents.on('render-process-gone', (_event, { reason }) => {
+      if (reason !== 'clean-exit') void this.#offerReload();
+    });
   }
 
   load(): Promise<void> {
