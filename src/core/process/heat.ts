@@ -53,7 +53,10 @@ export function heatUp(
   });
 }
 
-/** Remarks on a treatment: diffusivities extrapolated; dopants above the intrinsic density, which really diffuse faster. */
+/**
+ * Remarks on a treatment, from the profiles as it finds them: diffusivities extrapolated; dopants above the intrinsic
+ * density, which really diffuse faster.
+ */
 export function heatWarnings(
   contributions: readonly Contribution[],
   set: DiffusivitySet,

@@ -130,9 +130,7 @@ function runPredeposition(step: PredepositionStep, wafer: Wafer, recipe: Recipe)
   const heat: HeatTreatment = { ...step, endTemperature: step.temperature };
   const set = recipe.models.diffusivity;
   const { surface, shape } = predeposition(step, dtOf(set, step.dopant, heat));
-  const heated = heatUp(wafer.contributions, set, heat);
-  wafer.contributions = shape ? [...heated, { dopant: step.dopant, shape, stepIndex: step.index }] : heated;
-  treated(step, wafer, heat, recipe);
+  treat(step, wafer, heat, recipe, shape ? [{ dopant: step.dopant, shape, stepIndex: step.index }] : []);
   if (!shape)
     wafer.warnings.push({
       code: 'predeposition-nothing',
@@ -149,8 +147,7 @@ function runPredeposition(step: PredepositionStep, wafer: Wafer, recipe: Recipe)
 
 function runAnneal(step: AnnealStep, wafer: Wafer, recipe: Recipe): void {
   const set = recipe.models.diffusivity;
-  wafer.contributions = heatUp(wafer.contributions, set, step);
-  treated(step, wafer, step, recipe);
+  treat(step, wafer, step, recipe, []);
   const from = short(step.temperature - ZERO_CELSIUS);
   const to =
     step.endTemperature === step.temperature ? '' : ` to ${short(step.endTemperature - ZERO_CELSIUS)}`;
@@ -181,9 +178,18 @@ function runEtch(step: EtchStep, wafer: Wafer): void {
   });
 }
 
-function treated(step: RecipeStep, wafer: Wafer, heat: HeatTreatment, recipe: Recipe): void {
+/** Heats what is there; what arrives during the treatment has its share of it already. */
+function treat(
+  step: RecipeStep,
+  wafer: Wafer,
+  heat: HeatTreatment,
+  recipe: Recipe,
+  arriving: readonly Contribution[],
+): void {
+  const set = recipe.models.diffusivity;
+  wafer.warnings.push(...heatWarnings([...wafer.contributions, ...arriving], set, heat, step.index));
+  wafer.contributions = [...heatUp(wafer.contributions, set, heat), ...arriving];
   wafer.lastHeat = hottest(heat);
-  wafer.warnings.push(...heatWarnings(wafer.contributions, recipe.models.diffusivity, heat, step.index));
 }
 
 function report(step: RecipeStep, wafer: Wafer, title: string, figures: StepReport['figures']): void {

@@ -2,7 +2,7 @@
 
 import erfc from '@stdlib/math-base-special-erfc';
 import { gaussHermite } from '../numeric/gaussHermite';
-import { gaussLegendre, integratePanels } from '../numeric/gaussLegendre';
+import { gaussLegendre } from '../numeric/gaussLegendre';
 import { gaussRuleOfMasses } from '../numeric/golubWelsch';
 import { intervalOf } from '../numeric/interval';
 import { type Anatomy, edgesWithin, ladder, marksAt, PANEL_POINTS, shoulders } from './anatomy';
@@ -19,29 +19,23 @@ const AVERAGE_BELOW = 1 / 20;
 const REACH = 10;
 const CELL = 2;
 
-/** Diffuses `source` by Dt; `anatomy` and `at` are the source's own, needed here for the marks only. */
-export function convolved(source: Shape, Dt: number, anatomy: Anatomy, at: ConcentrationAt): ConvolvedShape {
+/** Diffuses `source` by Dt. The marks of a source span about eight of its standard deviations. */
+export function convolved(source: Shape, Dt: number): ConvolvedShape {
   const spread = Math.sqrt(2 * Dt);
-  const { mean, sigma } = meanAndSigma(anatomy, at);
+  const first = source.marks[0] ?? 0;
+  const last = source.marks[source.marks.length - 1] ?? 0;
   return {
     kind: 'convolved',
     source,
     Dt,
     marks: marksAt(
       0,
-      ...shoulders(mean, Math.hypot(sigma, spread)),
+      ...source.marks,
+      ...shoulders((first + last) / 2, Math.hypot((last - first) / 8, spread)),
       ...[0, ...source.jumps].flatMap((x) => shoulders(x, spread)),
     ),
     jumps: [],
   };
-}
-
-function meanAndSigma(anatomy: Anatomy, at: ConcentrationAt): { mean: number; sigma: number } {
-  const dose = integratePanels(at, anatomy.edges, PANEL);
-  if (!(dose > 0)) return { mean: anatomy.edges[0] ?? 0, sigma: 0 };
-  const mean = integratePanels((x) => x * at(x), anatomy.edges, PANEL) / dose;
-  const variance = integratePanels((x) => (x - mean) * (x - mean) * at(x), anatomy.edges, PANEL) / dose;
-  return { mean, sigma: Math.sqrt(variance) };
 }
 
 /** A stretch of the source two kernel widths long, as the few point masses the kernel cannot tell it from. */

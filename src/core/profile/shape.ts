@@ -55,9 +55,9 @@ export function diffuse(shape: Shape, Dt: number): Shape {
         ? shape
         : uniform(shape.concentration, shape.from, shape.to, shape.Dt + Dt);
     case 'convolved':
-      return convolved(shape.source, shape.Dt + Dt, anatomyOf(shape.source), evaluator(shape.source));
+      return convolved(shape.source, shape.Dt + Dt);
     default:
-      return convolved(shape, Dt, anatomyOf(shape), evaluator(shape));
+      return convolved(shape, Dt);
   }
 }
 
