@@ -11,6 +11,8 @@ export interface Anatomy {
   readonly edges: Float64Array;
   /** Where the shape is not smooth: jumps, kinks, ends. Ascending. */
   readonly kinks: readonly number[];
+  /** Points a panel needs where the edges are this dense, if fewer than the usual. */
+  readonly points?: number;
   /** Constant concentration below the last edge to any depth; 0 except for a wafer. */
   readonly beyond: number;
 }

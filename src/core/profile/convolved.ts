@@ -3,14 +3,13 @@
 import erfc from '@stdlib/math-base-special-erfc';
 import { gaussHermite } from '../numeric/gaussHermite';
 import { gaussLegendre } from '../numeric/gaussLegendre';
-import { gaussRuleOfMasses } from '../numeric/golubWelsch';
+import { gaussRuleOfMasses, type Rule } from '../numeric/golubWelsch';
 import { intervalOf } from '../numeric/interval';
 import { type Anatomy, edgesWithin, ladder, marksAt, PANEL_POINTS, shoulders } from './anatomy';
 import type { ConcentrationAt, ConvolvedShape, Shape } from './kinds';
 
 const PANEL = gaussLegendre(PANEL_POINTS);
-/** For panels much narrower than the kernel, as between the points of a dense table. */
-const NARROW_PANEL = gaussLegendre(6);
+/** In a panel this much narrower than the kernel only the source counts. */
 const NARROW = 0.25;
 /** For a kernel much narrower than anything in the source. */
 const AVERAGE = gaussHermite(14);
@@ -65,6 +64,7 @@ export function convolvedEvaluator(Dt: number, source: ConcentrationAt, anatomy:
   const firstCell = Math.floor(edges[0] / width);
   const lastCell = Math.floor(end / width);
   const kinks = marksAt(0, ...anatomy.kinks);
+  const narrowPanel = anatomy.points ? gaussLegendre(anatomy.points) : PANEL;
   const cells = new Map<number, Cell>();
 
   const cellAt = (k: number): Cell => {
@@ -74,7 +74,8 @@ export function convolvedEvaluator(Dt: number, source: ConcentrationAt, anatomy:
         Math.max(edges[0], k * width),
         Math.min(end, (k + 1) * width),
         edges,
-        spread,
+        NARROW * spread,
+        narrowPanel,
         source,
       );
       cells.set(k, cell);
@@ -100,11 +101,11 @@ export function convolvedEvaluator(Dt: number, source: ConcentrationAt, anatomy:
     return sum;
   };
   const isSmoothAround = (x: number): boolean => {
-    const i = intervalOf(edges, x);
-    if (i < 0 || i + 1 >= edges.length) return false;
-    if (spread > AVERAGE_BELOW * (edges[i + 1] - edges[i])) return false;
-    const k = intervalOf(kinks, x);
-    return x - kinks[k] > reach && (k + 1 >= kinks.length || kinks[k + 1] - x > reach);
+    const low = intervalOf(edges, x - reach);
+    const high = intervalOf(edges, x + reach);
+    if (low < 0 || high + 1 >= edges.length) return false;
+    for (let i = low; i <= high; i++) if (spread > AVERAGE_BELOW * (edges[i + 1] - edges[i])) return false;
+    return intervalOf(kinks, x - reach) === intervalOf(kinks, x + reach);
   };
   const fromBeyond =
     beyond > 0
@@ -118,7 +119,8 @@ function prepareCell(
   low: number,
   high: number,
   edges: Float64Array,
-  spread: number,
+  narrow: number,
+  narrowPanel: Rule,
   source: ConcentrationAt,
 ): Cell {
   const depths: number[] = [];
@@ -127,7 +129,7 @@ function prepareCell(
   for (let i = intervalOf(edges, low) + 1; left < high; i++) {
     const right = i < edges.length ? Math.min(high, edges[i]) : high;
     const half = (right - left) / 2;
-    const rule = right - left < NARROW * spread ? NARROW_PANEL : PANEL;
+    const rule = right - left < narrow ? narrowPanel : PANEL;
     for (let k = 0; k < rule.nodes.length; k++) {
       const depth = left + half * (1 + rule.nodes[k]);
       depths.push(depth);

@@ -12,8 +12,9 @@ import type { ConcentrationAt, TableShape } from './kinds';
 
 /** At most this many points become mesh marks, evenly chosen; the mesh refines by itself between them. */
 const MARKS = 60;
-/** Largest change of the logarithm across one quadrature panel. */
-const LOG_PER_PANEL = 4;
+/** Largest change of the logarithm across one quadrature panel, for which six points are accurate to 1e-12. */
+const LOG_PER_PANEL = 2;
+const PANEL_POINTS = 6;
 
 /**
  * @param depth ascending without repetition, >= 0, at least two.
@@ -88,6 +89,7 @@ export function tableAnatomy(shape: TableShape): Anatomy {
   return {
     edges: edgesWithin(edges, from, points[points.length - 1]),
     kinks: marksAt(from, ...points.filter((x) => x > from)),
+    points: PANEL_POINTS,
     beyond: 0,
   };
 }
