@@ -31,6 +31,14 @@ export { resolveTables, safeTableName } from './study/resolveTables';
 export type { Measurement, Study, StudyStep, StudyStepKind, TableChoice } from './study/schema';
 export { embedTable } from './study/table/embed';
 export { readTable } from './study/table/read';
+export type {
+  ColumnChoice,
+  TableColumn,
+  TableProfile,
+  TableQuestion,
+  TableReading,
+  TableWarning,
+} from './study/table/reading';
 export { parseStudy, studyProblems, validateStudy } from './study/validate';
 export { studyJsonSchema, writeStudy } from './study/write';
 export { PROGRAM_VERSION } from './version';

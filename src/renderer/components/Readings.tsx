@@ -1,0 +1,127 @@
+/** What the instruments would read, layer by layer, and what the steps did. */
+
+import { useLayoutEffect } from 'preact/hooks';
+import type { JunctionResult, StepResult } from '../../core/index';
+import { depthDigits, digits } from '../state/digits';
+import { outdated, shown, solveProblem } from '../state/solver';
+import { Copyable } from './Copyable';
+import { LayerCard } from './LayerCard';
+
+export function Readings() {
+  const current = shown.value;
+
+  useLayoutEffect(() => {
+    if (!current) return;
+    performance.mark('ohmstrata:readings', { detail: current.runId });
+    document.body.dataset.readings = String(current.runId);
+  }, [current?.runId]);
+
+  return (
+    <section
+      class={`readings ${outdated.value ? 'outdated' : ''}`}
+      aria-label="Readings"
+      aria-busy={outdated.value}
+    >
+      <h2 class="pane-title">
+        Readings
+        {solveProblem.value && current && <span class="tag tag-wrong">of the last valid recipe</span>}
+      </h2>
+      {current && (
+        <>
+          {current.solution.result.layers.map((layer) => (
+            <LayerCard key={layer.index} layer={layer} result={current.solution.result} />
+          ))}
+          <Junctions junctions={current.solution.result.junctions} />
+          <StepFigures steps={current.solution.result.steps} />
+          <p class="visually-hidden" aria-live="polite">
+            {spoken()}
+          </p>
+        </>
+      )}
+    </section>
+  );
+}
+
+/** One sentence for screen readers, said after each change. */
+function spoken(): string {
+  const layers = shown.value?.solution.result.layers ?? [];
+  return layers
+    .map(
+      (layer) =>
+        `Layer ${layer.index}, ${layer.type}: ${digits(layer.sheetResistance_ohmSq)} ohm per square, down to ${depthDigits(layer.bottom_um)} micrometres.`,
+    )
+    .join(' ');
+}
+
+function Junctions({ junctions }: { junctions: readonly JunctionResult[] }) {
+  return (
+    <section class="panel" aria-label="Junctions">
+      <h3>Junctions</h3>
+      {junctions.length === 0 ? (
+        <p class="card-note">None: the wafer is one layer.</p>
+      ) : (
+        <ol class="junctions">
+          {junctions.map(({ metallurgical_um: um }) => (
+            <li key={um}>
+              <Copyable name="Junction depth in µm" value={um} shown={depthDigits(um)} unit="µm" />
+            </li>
+          ))}
+        </ol>
+      )}
+    </section>
+  );
+}
+
+function StepFigures({ steps }: { steps: readonly StepResult[] }) {
+  const telling = steps.filter((step) => Object.keys(step.figures).length > 0);
+  if (telling.length === 0) return null;
+  return (
+    <section class="panel" aria-label="What the steps did">
+      <h3>What the steps did</h3>
+      {telling.map((step) => (
+        <div key={step.index} class="step-figures">
+          <h4>
+            <span class="step-number">{step.index}</span> {step.title}
+          </h4>
+          <dl class="figures">
+            {Object.entries(step.figures).map(([name, value]) => (
+              <Figure key={name} name={name} value={value} />
+            ))}
+          </dl>
+        </div>
+      ))}
+    </section>
+  );
+}
+
+const UNIT_SUFFIXES: Record<string, string> = {
+  um: 'µm',
+  nm: 'nm',
+  cm3: 'cm⁻³',
+  cm2: 'cm⁻²',
+  cm: 'cm',
+  C: '°C',
+  keV: 'keV',
+  percent: '%',
+  min: 'min',
+  s: 's',
+};
+
+/** "projectedRange_um" reads as "projected range" with µm behind the value. */
+function Figure({ name, value }: { name: string; value: number | string }) {
+  const [word, suffix] = name.split('_');
+  const unit = suffix && (UNIT_SUFFIXES[suffix] ?? suffix);
+  const words = word.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
+  return (
+    <>
+      <dt>{words}</dt>
+      <dd>
+        {typeof value === 'number' ? (
+          <Copyable name={words} value={value} shown={digits(value)} unit={unit} />
+        ) : (
+          value
+        )}
+      </dd>
+    </>
+  );
+}
