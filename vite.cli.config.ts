@@ -3,6 +3,11 @@
 import { builtinModules } from 'node:module';
 import { defineConfig, type UserConfig } from 'vite';
 
+/** Bundled CommonJS asks for its own file name, which an ES module has only as an address. */
+const BANNER = `#!/usr/bin/env node
+import { fileURLToPath as pathOfUrl } from 'node:url';
+const __filename = pathOfUrl(import.meta.url);`;
+
 /** A bundle of `entry` that plain Node runs as `outDir/fileName`. */
 export const nodeBundle = (entry: string, outDir: string, fileName: string): UserConfig => ({
   publicDir: false,
@@ -14,7 +19,7 @@ export const nodeBundle = (entry: string, outDir: string, fileName: string): Use
     minify: false,
     rolldownOptions: {
       external: [...builtinModules, /^node:/],
-      output: { entryFileNames: fileName, banner: '#!/usr/bin/env node' },
+      output: { entryFileNames: fileName, banner: BANNER },
     },
   },
   ssr: { noExternal: true },

@@ -3,7 +3,7 @@
 export { DOPANT_FACTS, DOPANTS, type Dopant, IMPLANT_SPECIES, type ImplantSpecies } from './material/dopants';
 export { concentrationOf, resistivityOf } from './material/mf723';
 export { MOBILITY_MODELS } from './mobility/list';
-export { uniformSilicon } from './mobility/uniform';
+export { uniformResistivity } from './mobility/resistivity';
 export { rangeStatistics } from './process/ranges';
 export { csvText } from './report/csv';
 export { type ColumnTable, columnsTable, type RowTable, readingsTable } from './report/tables';

@@ -183,3 +183,10 @@ test('the peak of a flat layer is at its top, not where rounding puts it', () =>
   expect(substrate.peakDepth).toBeLessThan(2 * UM);
   expect(substrate.peakNet).toBeCloseTo(1e15, -7);
 });
+
+test('the peak beside an abrupt end is the highest node, not the top of a parabola around a corner', () => {
+  // A shallow dip that ends abruptly above a flat wafer: the cells beyond it are a hundred thousand times wider.
+  const doping = dopingOf((x) => (x < 1.4 * UM ? 5.7e15 : 6e15), none, 525 * UM, [1.4 * UM]);
+  const [layer] = readings(doping);
+  expect(layer.peakNet / 6e15).toBeCloseTo(1, 9);
+});

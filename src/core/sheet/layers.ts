@@ -86,8 +86,8 @@ function peak({ depth, net }: ActiveDoping, { from, to }: LayerSpan): { peakNet:
   const bend = (2 * (slopeAfter - slopeBefore)) / (ha + hc);
   if (!(bend < 0)) return node;
   const slope = (slopeBefore * hc + slopeAfter * ha) / (ha + hc);
-  return {
-    peakNet: Math.exp(b - (slope * slope) / (2 * bend)),
-    peakDepth: depth[top] - slope / bend,
-  };
+  const rise = -(slope * slope) / (2 * bend);
+  // Between even steps the top rises by at most an eighth of the larger drop; more means a corner, or noise on a flat layer.
+  if (rise > Math.max(b - a, b - c) / 4) return node;
+  return { peakNet: Math.exp(b + rise), peakDepth: depth[top] - slope / bend };
 }
