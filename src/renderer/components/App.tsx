@@ -1,6 +1,5 @@
 /** The window: recipe at the left, tracks in the middle, readings at the right, between the bar and the status line. */
 
-import { useState } from 'preact/hooks';
 import { ImportSheet } from '../import/ImportSheet';
 import { importing, takeDropped } from '../state/files';
 import { panel } from '../state/viewState';
@@ -15,30 +14,12 @@ import { StatusBar } from './StatusBar';
 import { TopBar } from './TopBar';
 import { Tracks } from './Tracks';
 import { TrackTable } from './TrackTable';
-
-const bringsFiles = (event: DragEvent): boolean => event.dataTransfer?.types.includes('Files') ?? false;
+import { useDroppedFiles } from './useDroppedFiles';
 
 export function App() {
-  const [over, setOver] = useState(false);
+  const isOver = useDroppedFiles((files) => void takeDropped(files));
   return (
-    <div
-      class="window"
-      role="presentation"
-      onDragOver={(event) => {
-        if (!bringsFiles(event)) return;
-        event.preventDefault();
-        setOver(true);
-      }}
-      onDragLeave={(event) => {
-        if (event.relatedTarget === null) setOver(false);
-      }}
-      onDrop={(event) => {
-        if (!bringsFiles(event)) return;
-        event.preventDefault();
-        setOver(false);
-        void takeDropped((event.dataTransfer as DataTransfer).files);
-      }}
-    >
+    <div class="window">
       <TopBar />
       <RecoveryBar />
       <Recipe />
@@ -53,7 +34,7 @@ export function App() {
       {panel.value === 'about' && <About />}
       {panel.value === 'picture' && <PictureDialog />}
       <OpenQuestion />
-      {over && <div class="drop-here">Drop a study (.json) or a table (.csv, .txt)</div>}
+      {isOver && <div class="drop-here">Drop a study (.json) or a table (.csv, .txt)</div>}
     </div>
   );
 }

@@ -54,7 +54,6 @@ export function CommandSearch() {
         aria-controls={`${id}-list`}
         aria-activedescendant={commands.length > 0 ? `${id}-${at}` : undefined}
         placeholder="Type part of its name"
-        // biome-ignore lint/a11y/noAutofocus: the search exists to be typed into.
         autofocus
         value={typed}
         onInput={(event) => {

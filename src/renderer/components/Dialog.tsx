@@ -20,6 +20,7 @@ export function Dialog({ title, onClose, children, class: extra = '' }: Props) {
     return () => before?.focus?.();
   }, []);
   return (
+    // biome-ignore lint/a11y/useKeyWithClickEvents: a click beside the dialog does what Esc does.
     <dialog
       ref={dialog}
       class={`dialog ${extra}`}

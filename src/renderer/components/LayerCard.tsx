@@ -52,7 +52,6 @@ export function LayerCard({ layer, result }: Props) {
         unit="Ω/sq"
       />
       {measured.map((each, i) => (
-        // biome-ignore lint/suspicious/noArrayIndexKey: measured values have no identity but their place.
         <Measured key={i} {...each} />
       ))}
       <dl class="figures">

@@ -35,7 +35,6 @@ export function MeasurementsCard() {
   return (
     <Card title="Measured" summary={summary}>
       {measurements.map((measurement, i) => (
-        // biome-ignore lint/suspicious/noArrayIndexKey: measurements have no identity but their place.
         <fieldset class="measured" key={i}>
           <legend>
             Value {i + 1}

@@ -72,6 +72,7 @@ export function Menu({ label, name, items, class: extra = '', align = 'start' }:
   }
 
   return (
+    // biome-ignore lint/a11y/noStaticElementInteractions: the keys belong to the button and the items inside.
     <div class={`menu ${extra}`} ref={root} onKeyDown={onKeyDown} onFocusOut={onFocusOut}>
       <button
         type="button"
@@ -100,6 +101,7 @@ export function Menu({ label, name, items, class: extra = '', align = 'start' }:
                   {item.heading}
                 </div>
               )}
+              {/* biome-ignore lint/a11y/useAriaPropsSupportedByRole: only an item that is a menuitemradio has `checked`. */}
               <button
                 type="button"
                 tabIndex={-1}

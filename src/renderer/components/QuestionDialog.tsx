@@ -13,7 +13,6 @@ export function QuestionDialog({ title, text, choices, answer }: Question) {
             key={choice.value}
             type="button"
             class={`button ${i === 0 ? 'button-main' : ''} ${choice.grave ? 'button-grave' : ''}`}
-            // biome-ignore lint/a11y/noAutofocus: a question's safest answer takes the focus, as in any dialog.
             autofocus={i === 0}
             onClick={() => answer(choice.value)}
           >

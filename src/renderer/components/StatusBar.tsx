@@ -67,7 +67,6 @@ function WarningList({ warnings }: { warnings: readonly Warning[] }) {
   return (
     <ul class="warning-list" aria-label="Warnings">
       {warnings.map((warning, i) => (
-        // biome-ignore lint/suspicious/noArrayIndexKey: two warnings may be equal in every part.
         <li key={i}>
           {warning.step === undefined ? (
             <span class="warning-row">{warning.message}</span>

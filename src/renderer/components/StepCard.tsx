@@ -55,6 +55,7 @@ export function StepCard({ step, at, id, isGap, onGrab }: Props) {
       onKeyDown={onKeyDown}
     >
       <div class="step-head">
+        {/* biome-ignore lint/a11y/noStaticElementInteractions: by keyboard the card itself moves, with Alt and the arrows. */}
         <span
           class="grip"
           title="Drag to move this step (or Alt with up and down arrow)"

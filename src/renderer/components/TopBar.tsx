@@ -25,8 +25,8 @@ const THEMES: readonly { choice: ThemeChoice; name: string }[] = [
 export function TopBar() {
   return (
     <header class="top-bar">
-      <span class="mark" aria-hidden="true">
-        <svg viewBox="0 0 24 24" width="22" height="22">
+      <span class="mark">
+        <svg viewBox="0 0 24 24" width="22" height="22" aria-hidden="true">
           <path class="mark-layers" d="M2 7h20M2 12h20M2 17h20" />
           <path class="mark-curve" d="M3 5c4 0 5 14 9 14s5-14 9-14" />
         </svg>

@@ -63,7 +63,7 @@ interface ToggleProps<T extends string> {
 
 function Toggle<T extends string>({ name, options, chosen, choose }: ToggleProps<T>) {
   return (
-    <div class="toggle" role="group" aria-label={name}>
+    <fieldset class="toggle" aria-label={name}>
       {options.map((option) => (
         <button
           key={option.value}
@@ -74,6 +74,6 @@ function Toggle<T extends string>({ name, options, chosen, choose }: ToggleProps
           {option.name}
         </button>
       ))}
-    </div>
+    </fieldset>
   );
 }

@@ -21,10 +21,8 @@ export function TablePreview({ sketch }: { sketch: TableSketch }) {
         </thead>
         <tbody>
           {sketch.preview.map((row, i) => (
-            // biome-ignore lint/suspicious/noArrayIndexKey: rows of a preview have no identity but their place.
             <tr key={i}>
               {row.map((cell, j) => (
-                // biome-ignore lint/suspicious/noArrayIndexKey: neither have cells.
                 <td key={j} class={sketch.columns[j]?.role === 'other' ? 'column-other' : ''}>
                   {cell}
                 </td>

@@ -104,7 +104,7 @@ function curveTrace(curve: Curve, depth: Float64Array, axis: Axis): object {
 /** Keeps a logarithmic curve running out of the picture where it falls to nothing, instead of breaking off above. */
 function abovePower(values: Float64Array, power: number): Float64Array {
   const least = 10 ** power;
-  return values.map((value) => (value < least ? least : value));
+  return values.map((value) => Math.max(value, least));
 }
 
 function depthAxis(window: DepthWindow, view: TrackView, palette: Palette): object {
