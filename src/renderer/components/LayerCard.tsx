@@ -29,7 +29,7 @@ function rowsOf(layer: LayerResult): Row[] {
     ['TC1', layer.tcr1_ppmK, digits(layer.tcr1_ppmK, 3), 'ppm/K'],
     row('peak net', layer.peakNet_cm3, 'cm⁻³'),
     ['at depth', layer.peakDepth_um, depthDigits(layer.peakDepth_um), 'µm'],
-    row('net at its top', layer.surfaceNet_cm3, 'cm⁻³'),
+    ...(layer.index === 1 ? [row('net at the surface', layer.surfaceNet_cm3, 'cm⁻³')] : []),
   ];
 }
 
@@ -69,12 +69,17 @@ export function LayerCard({ layer, result }: Props) {
 }
 
 function Measured({ measured_ohmSq, difference_percent, difference_sigma }: MeasurementResult) {
-  const signed = (value: number, count: number): string => (value > 0 ? '+' : '') + digits(value, count);
   return (
     <p class="measured-line">
-      measured {digits(measured_ohmSq)} Ω/sq
-      {difference_percent !== null && <>, predicted {signed(difference_percent, 2)} %</>}
-      {difference_sigma !== null && <> ({signed(difference_sigma, 2)} σ)</>}
+      measured {digits(measured_ohmSq)} Ω/sq: {differenceInWords(difference_percent, difference_sigma)}
     </p>
   );
+}
+
+/** "2.7 % above the prediction (2.5 σ)". */
+function differenceInWords(percent: number | null, sigma: number | null): string {
+  if (percent === null) return 'there is no prediction for this layer';
+  const side = percent >= 0 ? 'above' : 'below';
+  const inSigma = sigma === null ? '' : ` (${digits(Math.abs(sigma), 2)} σ)`;
+  return `${digits(Math.abs(percent), 2)} % ${side} the prediction${inSigma}`;
 }

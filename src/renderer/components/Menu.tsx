@@ -36,7 +36,9 @@ export function Menu({ label, name, items, class: extra = '', align = 'start' }:
   ];
 
   useEffect(() => {
-    if (open) itemNodes()[0]?.focus();
+    if (!open) return;
+    root.current?.querySelector('[role="menu"]')?.scrollIntoView({ block: 'nearest' });
+    itemNodes()[0]?.focus();
   }, [open]);
 
   function close(): void {

@@ -98,7 +98,6 @@ const UNIT_SUFFIXES: Record<string, string> = {
   um: 'µm',
   nm: 'nm',
   cm3: 'cm⁻³',
-  cm2: 'cm⁻²',
   cm: 'cm',
   C: '°C',
   keV: 'keV',
@@ -107,11 +106,13 @@ const UNIT_SUFFIXES: Record<string, string> = {
   s: 's',
 };
 
-/** "projectedRange_um" reads as "projected range" with µm behind the value. */
+/** "projectedRange_um" reads as "projected range" with µm behind the value, "Dt_B_cm2" as "Dt of B" with cm². */
 function Figure({ name, value }: { name: string; value: number | string }) {
-  const [word, suffix] = name.split('_');
-  const unit = suffix && (UNIT_SUFFIXES[suffix] ?? suffix);
-  const words = word.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
+  const [word, ...rest] = name.split('_');
+  const suffix = rest.pop();
+  const unit = suffix && unitOf(word, suffix);
+  const plain = word.replace(/([a-z])([A-Z])/g, (_, end, start) => `${end} ${start.toLowerCase()}`);
+  const words = [plain, ...rest].join(' of ');
   return (
     <>
       <dt>{words}</dt>
@@ -124,4 +125,10 @@ function Figure({ name, value }: { name: string; value: number | string }) {
       </dd>
     </>
   );
+}
+
+/** The suffix says cm2 for atoms on an area and for an area alike; a dose is the former. */
+function unitOf(word: string, suffix: string): string {
+  if (suffix === 'cm2') return /dose$/i.test(word) ? 'cm⁻²' : 'cm²';
+  return UNIT_SUFFIXES[suffix] ?? suffix;
 }

@@ -30,6 +30,10 @@ export function ImportSheet({ table }: Props) {
   const isReady = !isBusy && problem === null && taken > 0 && !lacksDopant;
 
   useEffect(() => heading.current?.focus(), []);
+  useEffect(() => {
+    // An answered question takes the focus with it; without one the keys would reach nothing.
+    if (document.activeElement === document.body) heading.current?.focus();
+  }, [sketch]);
 
   async function take(): Promise<void> {
     const steps = await state.embed();

@@ -24,7 +24,7 @@ export function TablePreview({ sketch }: { sketch: TableSketch }) {
             <tr key={i}>
               {row.map((cell, j) => (
                 <td key={j} class={sketch.columns[j]?.role === 'other' ? 'column-other' : ''}>
-                  {cell}
+                  {shortNumber(cell)}
                 </td>
               ))}
             </tr>
@@ -33,4 +33,9 @@ export function TablePreview({ sketch }: { sketch: TableSketch }) {
       </table>
     </section>
   );
+}
+
+/** Long whole numbers as powers of ten: 18050... with twenty digits cannot be read. */
+function shortNumber(cell: string): string {
+  return /^\d{7,}$/.test(cell) ? Number(cell).toExponential().replace('e+', 'e') : cell;
 }

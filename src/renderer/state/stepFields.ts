@@ -151,7 +151,7 @@ function implantFields(step: Extract<StudyStep, { step: 'implant' }>, study: Stu
       key: 'shape',
       label: 'Shape',
       options: [
-        { value: 'pearson', name: 'Pearson IV' },
+        { value: 'pearson', name: 'Pearson (four moments)' },
         { value: 'gaussian', name: 'Gaussian' },
       ],
     },

@@ -8,6 +8,7 @@ import { type Curve, type TrackName, trackCurves } from './curves';
 import type { DepthWindow } from './depthWindow';
 import { type Frame, frameOf, type Size } from './frame';
 import { labelPlaces } from './labels';
+import { bandTraces, junctionLabels, junctionLines } from './layerMarks';
 import { PALETTES, type Palette } from './palette';
 import { linearRange, logRange, positiveSpan } from './ranges';
 import { DEPTH_UNIT_NAMES, PER_UM, type TrackView } from './view';
@@ -25,7 +26,8 @@ interface Axis {
 
 const AXES: Record<TrackName, string> = { doping: 'y', carriers: 'y2', mobility: 'y3', share: 'y4' };
 const CUMULATIVE_AXIS = 'y5';
-const BAND_AXIS = 'y6';
+/** Mean width of a letter, in units of the type size. */
+const LETTER_WIDTH = 0.5;
 
 export function buildFigure(solution: Solution, view: TrackView, window: DepthWindow, size: Size): Figure {
   const palette = PALETTES[view.theme];
@@ -50,10 +52,10 @@ export function buildFigure(solution: Solution, view: TrackView, window: DepthWi
       dragmode: 'zoom',
       bargap: 0,
       xaxis: depthAxis(window, view, palette),
-      ...valueAxes(axes, frame, view, palette),
+      ...valueAxes(axes, frame, size, view, palette),
       shapes: junctionLines(solution, window, view, palette, frame),
       annotations: [
-        ...junctionLabels(solution, window, view, palette, frame),
+        ...junctionLabels(solution, window, view, palette, frame, size),
         ...curveLabels(solution, curves, axes, frame, size, window, view, palette),
       ],
     },
@@ -130,31 +132,43 @@ const axisLook = (palette: Palette): object => ({
   tickfont: { color: palette.faintInk },
 });
 
-function valueAxes(axes: Axes, frame: Frame, view: TrackView, palette: Palette): object {
+/** The whole title where the track is high enough for it, its unit alone where it is not. */
+function axisTitle(name: string, unit: string, height: number, fontSize: number): string {
+  const whole = `${name} (${unit})`;
+  const letters = whole.replace(/<[^>]*>/g, '').length;
+  return letters * LETTER_WIDTH * fontSize <= height ? whole : unit;
+}
+
+function valueAxes(axes: Axes, frame: Frame, size: Size, view: TrackView, palette: Palette): object {
+  const inside = size.height - frame.margin.t - frame.margin.b;
+  const titled = (name: string, unit: string, [low, high]: readonly [number, number]): object => ({
+    text: axisTitle(name, unit, (high - low) * inside, view.fontSize),
+    standoff: 4,
+  });
   const common = { ...axisLook(palette), fixedrange: true, titlefont: { size: view.fontSize } };
-  const concentration = (axis: Axis, domain: readonly [number, number], title: string): object => ({
+  const concentration = (axis: Axis, domain: readonly [number, number], name: string): object => ({
     ...common,
     type: axis.log ? 'log' : 'linear',
     range: axis.range,
     domain,
-    title: { text: title, standoff: 4 },
+    title: titled(name, 'cm<sup>−3</sup>', domain),
     exponentformat: 'power',
     ...(axis.log ? { dtick: wholeDecades(axis.range) } : { nticks: 5 }),
   });
-  const linear = (axis: Axis, domain: readonly [number, number], title: string): object => ({
+  const linear = (axis: Axis, domain: readonly [number, number], name: string, unit: string): object => ({
     ...common,
     range: axis.range,
     domain,
-    title: { text: title, standoff: 4 },
+    title: titled(name, unit, domain),
     nticks: 4,
     separatethousands: false,
   });
   const perDepth = DEPTH_UNIT_NAMES[view.depthUnit];
   return {
-    yaxis: concentration(axes.doping, frame.domains.doping, 'doping (cm<sup>−3</sup>)'),
-    yaxis2: concentration(axes.carriers, frame.domains.carriers, 'carriers (cm<sup>−3</sup>)'),
-    yaxis3: linear(axes.mobility, frame.domains.mobility, 'mobility (cm²/Vs)'),
-    yaxis4: linear(axes.share, frame.domains.share, `share (%/${perDepth})`),
+    yaxis: concentration(axes.doping, frame.domains.doping, 'doping'),
+    yaxis2: concentration(axes.carriers, frame.domains.carriers, 'carriers'),
+    yaxis3: linear(axes.mobility, frame.domains.mobility, 'mobility', 'cm²/Vs'),
+    yaxis4: linear(axes.share, frame.domains.share, 'share', `%/${perDepth}`),
     yaxis5: {
       ...common,
       overlaying: AXES.share,
@@ -171,101 +185,6 @@ function valueAxes(axes: Axes, frame: Frame, view: TrackView, palette: Palette):
 
 /** Every decade, or every second or third where there are many. */
 const wholeDecades = ([low, high]: readonly [number, number]): number => Math.ceil((high - low) / 5);
-
-/** One block a layer: a tint and its letter; p hatched, n plain. */
-function bandTraces(solution: Solution, window: DepthWindow, view: TrackView, palette: Palette): object[] {
-  const factor = PER_UM[view.depthUnit];
-  return (['p', 'n'] as const).map((type) => {
-    const spans = solution.result.layers
-      .filter((layer) => layer.type === type)
-      .map(({ top_um, bottom_um }) => [Math.max(top_um, window.from_um), Math.min(bottom_um, window.to_um)])
-      .filter(([from, to]) => to > from);
-    const isWide = ([from, to]: number[]): boolean => (to - from) / (window.to_um - window.from_um) > 0.02;
-    return {
-      type: 'bar',
-      name: `${type}-type layers`,
-      x: spans.map(([from, to]) => ((from + to) / 2) * factor),
-      width: spans.map(([from, to]) => (to - from) * factor),
-      y: spans.map(() => 1),
-      yaxis: BAND_AXIS,
-      text: spans.map((span) => (isWide(span) ? type : '')),
-      textposition: 'inside',
-      insidetextanchor: 'middle',
-      textangle: 0,
-      textfont: { color: palette.ink, size: view.fontSize },
-      marker: {
-        color: type === 'p' ? palette.bandP : palette.bandN,
-        line: { color: palette.axis, width: 1 },
-        pattern: {
-          shape: type === 'p' ? '/' : '',
-          fgcolor: palette.holes,
-          fgopacity: 0.3,
-          size: 7,
-          solidity: 0.15,
-        },
-      },
-      hoverinfo: 'skip',
-    };
-  });
-}
-
-function junctionsIn(solution: Solution, window: DepthWindow): number[] {
-  return solution.result.junctions
-    .map((junction) => junction.metallurgical_um)
-    .filter((depth) => depth >= window.from_um && depth <= window.to_um);
-}
-
-function junctionLines(
-  solution: Solution,
-  window: DepthWindow,
-  view: TrackView,
-  palette: Palette,
-  frame: Frame,
-): object[] {
-  return junctionsIn(solution, window).map((um) => ({
-    type: 'line',
-    xref: 'x',
-    yref: 'paper',
-    x0: um * PER_UM[view.depthUnit],
-    x1: um * PER_UM[view.depthUnit],
-    y0: 0,
-    y1: frame.domains.band[0],
-    line: { color: palette.junction, width: 1, dash: '3px,3px' },
-  }));
-}
-
-/** Depths over the junction lines; where two would run into each other, the deeper one is left to the readings. */
-function junctionLabels(
-  solution: Solution,
-  window: DepthWindow,
-  view: TrackView,
-  palette: Palette,
-  frame: Frame,
-): object[] {
-  const width = window.to_um - window.from_um;
-  const unit = DEPTH_UNIT_NAMES[view.depthUnit];
-  let last = Number.NEGATIVE_INFINITY;
-  return junctionsIn(solution, window).flatMap((um) => {
-    if (um - last < 0.12 * width) return [];
-    last = um;
-    const atEnd = um > window.to_um - 0.06 * width;
-    const atStart = um < window.from_um + 0.06 * width;
-    return [
-      {
-        xref: 'x',
-        yref: 'paper',
-        x: um * PER_UM[view.depthUnit],
-        y: (frame.domains.band[0] + frame.domains.doping[1]) / 2,
-        yanchor: 'middle',
-        xanchor: atEnd ? 'right' : atStart ? 'left' : 'center',
-        text: `${(um * PER_UM[view.depthUnit]).toPrecision(4)} ${unit}`,
-        showarrow: false,
-        bgcolor: palette.ground,
-        font: { color: palette.ink, size: view.fontSize },
-      },
-    ];
-  });
-}
 
 function curveLabels(
   solution: Solution,
