@@ -1,13 +1,12 @@
 /** How the window looks and answers: sizes, themes, accessibility, long words, and how long things take. */
 
 import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
-import { createRequire } from 'node:module';
 import { join } from 'node:path';
+import axe from 'axe-core';
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest';
 import { type Desktop, launch } from './launch';
 import { Person } from './person';
 
-const AXE = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
 const SIZES = [
   [1280, 800],
   [1920, 1080],
@@ -50,7 +49,7 @@ async function violations(): Promise<string[]> {
     return webContents.executeJavaScript(`${source};
       axe.run(document, { resultTypes: ['violations'] }).then(({ violations }) =>
         violations.map((v) => v.id + ': ' + v.nodes.map((n) => n.html.slice(0, 200)).join(' | ')))`);
-  }, AXE)) as string[];
+  }, axe.source)) as string[];
 }
 
 describe.each(['Light', 'Dark'] as const)('%s', (theme) => {

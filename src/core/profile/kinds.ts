@@ -1,6 +1,6 @@
 /** The kinds of shapes as plain data. Depths and lengths in cm, concentrations in cm^-3, Dt in cm^2, doses in cm^-2. */
 
-export interface ShapeBase {
+interface ShapeBase {
   /** Depths worth a mesh node: peaks, shoulders (mean +- 1, 2, 4 sigma), kinks. Ascending, >= 0. */
   readonly marks: readonly number[];
   /** Depths at which the concentration jumps: the mesh puts a node on either side. */

@@ -17,7 +17,7 @@ import { pearson, pearsonAnatomy, pearsonEvaluator } from './pearson';
 import { table, tableAnatomy, tableEvaluator } from './table';
 import { uniform, uniformAnatomy, uniformEvaluator } from './uniform';
 
-export type { ConcentrationAt, Shape, ShapeBase } from './kinds';
+export type { ConcentrationAt, Shape } from './kinds';
 export { erfcShape, gaussian, pearson, table, uniform };
 
 const DOSE_RULE = gaussLegendre(16);
