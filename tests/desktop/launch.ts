@@ -4,6 +4,7 @@
  * `npm test` builds the program and names the runtime in OHMSTRATA_ELECTRON.
  */
 
+import type { ChildProcess } from 'node:child_process';
 import { mkdirSync, mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
@@ -22,6 +23,8 @@ export interface LaunchOptions {
 
 export class Desktop {
   readonly app: ElectronApplication;
+  /** Held from the start: once the program has ended, its connection no longer tells. */
+  readonly program: ChildProcess;
   readonly page: Page;
   /** For files of the test; goes when the program is closed. */
   readonly folder: string;
@@ -32,6 +35,7 @@ export class Desktop {
 
   constructor(app: ElectronApplication, page: Page, folder: string) {
     this.app = app;
+    this.program = app.process();
     this.page = page;
     this.folder = folder;
     page.on('pageerror', (error) => this.errors.push(error.message));
@@ -96,7 +100,7 @@ export class Desktop {
 
   /** Ends the program without the question about unsaved work. */
   async end(): Promise<void> {
-    const program = this.app.process();
+    const { program } = this;
     const hasEnded = new Promise((done) => program.once('exit', done));
     if (program.exitCode === null && program.signalCode === null) {
       await this.app.evaluate(({ app }) => app.exit(0)).catch(() => undefined);

@@ -31,8 +31,8 @@ async function start(options: LaunchOptions = {}): Promise<Desktop> {
 
 const exitOf = (running: Desktop) =>
   new Promise<number | null>((done) => {
-    const { exitCode } = running.app.process();
-    if (exitCode === null) running.app.process().once('exit', done);
+    const { exitCode } = running.program;
+    if (exitCode === null) running.program.once('exit', done);
     else done(exitCode);
   });
 
@@ -77,7 +77,7 @@ test('unsaved work outlives a program that is killed', async () => {
   await first.page.evaluate(() => window.ohmstrata!.keepRecovery({ name: 'my study', text: '{"work":1}' }));
   expect(readdirSync(join(userData, 'recovery'))).toHaveLength(1);
   const killed = exitOf(first);
-  first.app.process().kill('SIGKILL');
+  first.program.kill('SIGKILL');
   await killed;
   expect(readdirSync(join(userData, 'recovery'))).toHaveLength(1);
 });
