@@ -2,7 +2,9 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { ELEMENTARY_CHARGE } from '../src/core/material/constants';
 import { intrinsicDensity } from '../src/core/material/intrinsic';
+import { resistivityOf } from '../src/core/material/mf723';
 import { mobilityModel } from '../src/core/mobility/list';
+import { uniformSilicon } from '../src/core/mobility/uniform';
 import { type SolveOptions, solve } from '../src/core/solve';
 import type { Study } from '../src/core/study/schema';
 import { integrate } from './support/quadrature';
@@ -195,6 +197,18 @@ describe('what a study may ask for', () => {
     const { wafer } = readings(study({ wafer: { dopant: 'boron', resistivity_ohmCm: 10 } }));
     expect(wafer.concentration_cm3).toBeGreaterThan(1.3e15);
     expect(wafer.concentration_cm3).toBeLessThan(1.4e15);
+  });
+
+  test('the wafer’s resistivity is told by the standard and by the study’s own mobility model', () => {
+    const { wafer } = readings(
+      study({
+        wafer: { dopant: 'boron', concentration_cm3: 1e17 },
+        temperature_C: 40,
+        models: { mobility: 'arora' },
+      }),
+    );
+    expect(wafer.resistivity_ohmCm).toBe(resistivityOf('boron', 1e17).value);
+    expect(wafer.modelResistivity_ohmCm).toBe(uniformSilicon('boron', 1e17, 313.15, 'arora').resistivity);
   });
 
   test('a measurement is compared in percent and in its own sigma', () => {

@@ -5,6 +5,7 @@ import { DOPANT_FACTS } from './material/dopants';
 import { INTRINSIC_SOURCE } from './material/intrinsic';
 import { resistivityOf } from './material/mf723';
 import type { MobilityModel } from './mobility/model';
+import { uniformSilicon } from './mobility/uniform';
 import { accumulate } from './numeric/simpson';
 import type { ProcessResult } from './process/runRecipe';
 import type { SampledDoping } from './profile/doping';
@@ -62,6 +63,12 @@ export function buildResult(parts: BuiltParts): ResultDocument {
       dopant: wafer.dopant,
       concentration_cm3: wafer.concentration,
       resistivity_ohmCm: resistivityOf(wafer.dopant, wafer.concentration).value,
+      modelResistivity_ohmCm: uniformSilicon(
+        wafer.dopant,
+        wafer.concentration,
+        recipe.temperature,
+        model.name,
+      ).resistivity,
     },
     junctions: parts.doping.junctions.map((i) => junctionResult(parts.doping.depth[i] * UM_PER_CM)),
     layers,

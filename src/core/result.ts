@@ -77,7 +77,14 @@ export interface ResultDocument {
     activation: ActivationChoice;
     intrinsic: string;
   };
-  wafer: { type: 'n' | 'p'; dopant: Dopant; concentration_cm3: number; resistivity_ohmCm: number };
+  wafer: {
+    type: 'n' | 'p';
+    dopant: Dopant;
+    concentration_cm3: number;
+    /** Of the wafer as delivered: by the standard (SEMI MF723, 23 C), and by the study's mobility model and temperature. */
+    resistivity_ohmCm: number;
+    modelResistivity_ohmCm: number;
+  };
   junctions: JunctionResult[];
   layers: LayerResult[];
   measurements: MeasurementResult[];

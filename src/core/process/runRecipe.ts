@@ -5,6 +5,7 @@ import type { Dopant } from '../material/dopants';
 import type { Contribution } from '../profile/doping';
 import { doseOf, erfcShape, gaussian, type Shape, table, uniform } from '../profile/shape';
 import type { Warning } from '../study/problem';
+import { formatQuantity } from '../study/quantity';
 import type {
   AnnealStep,
   EpitaxyStep,
@@ -113,7 +114,7 @@ function runImplant(step: ImplantStep, wafer: Wafer): void {
   const through = step.screen
     ? ` through ${short(step.screen.thickness * 1e7)} nm of ${step.screen.material}`
     : '';
-  const title = `${step.species} implant, ${step.dose.toExponential(2)} cm^-2 at ${short(step.energy_keV)} keV${through}`;
+  const title = `${step.species} implant, ${formatQuantity(step.dose, 'dose')} cm^-2 at ${short(step.energy_keV)} keV${through}`;
   report(step, wafer, title, {
     ranges: step.ranges,
     projectedRange_um: statistics.projectedRange * UM_PER_CM,

@@ -1,7 +1,9 @@
 /** The wafer everything begins with: background doping stated as concentration or resistivity, and what ends the film. */
 
 import { concentrationOf, DOPANT_FACTS, formatQuantity, resistivityOf } from '../../core/index';
+import { digits } from '../state/digits';
 import { withStudy } from '../state/draft';
+import { shown } from '../state/solver';
 import { DOPANT_OPTIONS } from '../state/stepFields';
 import { edit, study } from '../state/studySession';
 import { Card } from './Card';
@@ -92,6 +94,20 @@ export function WaferCard() {
           setWafer('wafer orientation', { ...wafer, orientation: orientation as Wafer['orientation'] })
         }
       />
+      <Resistivities />
     </Card>
+  );
+}
+
+/** The wafer's resistivity by the standard and by the study's own mobility model, which need not agree. */
+function Resistivities() {
+  const result = shown.value?.solution.result;
+  if (!result) return null;
+  const { wafer, models, temperature_C } = result;
+  return (
+    <p class="card-note">
+      {digits(wafer.concentration_cm3)} cm⁻³ is {digits(wafer.resistivity_ohmCm)} Ω cm by SEMI MF723 at 23 °C,{' '}
+      {digits(wafer.modelResistivity_ohmCm)} Ω cm by {models.mobility} at {temperature_C} °C.
+    </p>
   );
 }
