@@ -1,5 +1,8 @@
 /** The way out: what the chain computed, in the units and names of the result document. */
 
+import type { CarrierChoice } from './carriers/carriers';
+import { IONISATION_SOURCE } from './carriers/ionisation';
+import type { CarrierState } from './carriers/state';
 import { ZERO_CELSIUS } from './material/constants';
 import { DOPANT_FACTS } from './material/dopants';
 import { INTRINSIC_SOURCE } from './material/intrinsic';
@@ -8,7 +11,6 @@ import type { MobilityModel } from './mobility/model';
 import { uniformSilicon } from './mobility/uniform';
 import { accumulate } from './numeric/simpson';
 import type { ProcessResult } from './process/runRecipe';
-import type { SampledDoping } from './profile/doping';
 import {
   type JunctionResult,
   type LayerResult,
@@ -19,7 +21,9 @@ import {
 } from './result';
 import type { Conduction } from './sheet/conduction';
 import type { LayerReadings, LayerSpan } from './sheet/layers';
+import type { ModelReading } from './sheet/modelSpread';
 import { fingerprint } from './study/fingerprint';
+import type { MobilityName } from './study/names';
 import type { Warning } from './study/problem';
 import type { Recipe } from './study/recipe';
 import type { Measurement, Study } from './study/schema';
@@ -31,13 +35,15 @@ export interface BuiltParts {
   study: Study;
   recipe: Recipe;
   process: ProcessResult;
-  doping: SampledDoping;
   model: MobilityModel;
+  choice: CarrierChoice;
+  state: CarrierState;
   flow: Conduction;
   spans: readonly LayerSpan[];
   readings: readonly LayerReadings[];
   /** 1/K for each layer. */
   coefficients: readonly (number | null)[];
+  spread: readonly ModelReading[];
   warnings: readonly Warning[];
 }
 
@@ -53,8 +59,14 @@ export function buildResult(parts: BuiltParts): ResultDocument {
     models: {
       mobility: model.name,
       mobilitySource: model.source,
-      carriers: study.models.carriers,
-      ionisation: study.models.ionisation,
+      carriers: parts.choice.carriers,
+      ionisation: parts.choice.ionisation,
+      ionisationSource: parts.choice.ionisation === 'levels' ? IONISATION_SOURCE : 'every active dopant',
+      statistics: parts.choice.statistics,
+      narrowing: parts.choice.narrowing,
+      unfit: Object.fromEntries(
+        parts.spread.flatMap(({ mobility, unfit }) => (unfit === null ? [] : [[mobility, unfit]])),
+      ),
       activation: recipe.models.activation,
       intrinsic: INTRINSIC_SOURCE,
     },
@@ -68,22 +80,62 @@ export function buildResult(parts: BuiltParts): ResultDocument {
         wafer.concentration,
         recipe.temperature,
         model.name,
+        parts.choice.ionisation,
       ).resistivity,
     },
-    junctions: parts.doping.junctions.map((i) => junctionResult(parts.doping.depth[i] * UM_PER_CM)),
+    junctions: junctionResults(parts.state),
     layers,
     measurements: (study.measurements ?? []).map((measurement) => measurementResult(measurement, layers)),
     steps: process.reports,
-    mesh: { nodes: parts.doping.depth.length },
+    mesh: { nodes: parts.state.doping.depth.length },
     warnings: [...parts.warnings],
   };
 }
 
-function junctionResult(depth_um: number): JunctionResult {
-  return { metallurgical_um: depth_um, electrical_um: depth_um, depletion_um: null, builtIn_V: null };
+/** Every sign change of net doping and every place where n = p, in order of depth. */
+function junctionResults({ doping, electrostatics, cuts }: CarrierState): JunctionResult[] {
+  const um = (depth: number): number => depth * UM_PER_CM;
+  const metallurgical = doping.junctions.map((i) => um(doping.depth[i]));
+  if (!electrostatics)
+    return cuts.map((_, k) => ({
+      metallurgical_um: metallurgical[k],
+      electrical_um: metallurgical[k],
+      depletion_um: null,
+      builtIn_V: null,
+      capacitance_nFcm2: null,
+    }));
+  const electrical = electrostatics.junctions.map(
+    (junction): JunctionResult => ({
+      metallurgical_um: junction.metallurgical === null ? null : metallurgical[junction.metallurgical],
+      electrical_um: um(junction.depth),
+      depletion_um: [um(junction.depletion[0]), um(junction.depletion[1])],
+      builtIn_V: junction.builtIn,
+      capacitance_nFcm2: junction.capacitance * 1e9,
+    }),
+  );
+  const matched = new Set(electrostatics.junctions.map((junction) => junction.metallurgical));
+  const alone = metallurgical.flatMap((depth, k): JunctionResult[] =>
+    matched.has(k)
+      ? []
+      : [
+          {
+            metallurgical_um: depth,
+            electrical_um: null,
+            depletion_um: null,
+            builtIn_V: null,
+            capacitance_nFcm2: null,
+          },
+        ],
+  );
+  return [...electrical, ...alone].sort((a, b) => depthOf(a) - depthOf(b));
 }
 
-function layerResult({ recipe, doping, spans, readings, coefficients }: BuiltParts, i: number): LayerResult {
+const depthOf = ({ electrical_um, metallurgical_um }: JunctionResult): number =>
+  electrical_um ?? metallurgical_um ?? 0;
+
+function layerResult(parts: BuiltParts, i: number): LayerResult {
+  const { recipe, spans, readings, coefficients, spread } = parts;
+  const { doping } = parts.state;
   const span = spans[i];
   const reading = readings[i];
   const coefficient = coefficients[i];
@@ -97,6 +149,7 @@ function layerResult({ recipe, doping, spans, readings, coefficients }: BuiltPar
     bottom_um: bottom * UM_PER_CM,
     bottomEdge: i < spans.length - 1 ? 'junction' : film,
     sheetResistance_ohmSq: 1 / reading.sheetConductance,
+    ...spreadOf(spread, i, reading.sheetConductance),
     sheetConductance_S: reading.sheetConductance,
     netDose_cm2: reading.netDose,
     carrierDose_cm2: reading.carrierDose,
@@ -108,6 +161,19 @@ function layerResult({ recipe, doping, spans, readings, coefficients }: BuiltPar
     peakNet_cm3: reading.peakNet,
     peakDepth_um: reading.peakDepth * UM_PER_CM,
     tcr1_ppmK: coefficient === null ? null : coefficient * 1e6,
+  };
+}
+
+function spreadOf(
+  spread: readonly ModelReading[],
+  layer: number,
+  own: number,
+): Pick<LayerResult, 'sheetResistanceSpread_ohmSq' | 'sheetResistanceByMobility_ohmSq'> {
+  const values = spread.map(({ mobility, conductances }) => [mobility, 1 / conductances[layer]] as const);
+  const fit = values.filter((_, k) => spread[k].unfit === null).map(([, value]) => value);
+  return {
+    sheetResistanceSpread_ohmSq: [Math.min(1 / own, ...fit), Math.max(1 / own, ...fit)],
+    sheetResistanceByMobility_ohmSq: Object.fromEntries(values) as Record<MobilityName, number>,
   };
 }
 
@@ -127,7 +193,8 @@ function measurementResult(measurement: Measurement, layers: readonly LayerResul
 }
 
 /** Every column against depth, in the order of the mesh. */
-export function buildColumns({ doping, flow, spans, readings }: BuiltParts): SolvedColumns {
+export function buildColumns({ state, flow, spans, readings }: BuiltParts): SolvedColumns {
+  const { doping, electrostatics } = state;
   const count = doping.depth.length;
   const lattice = new Float64Array(count);
   const impurity = new Float64Array(count);
@@ -151,11 +218,12 @@ export function buildColumns({ doping, flow, spans, readings }: BuiltParts): Sol
       chemical_cm3: chemical,
       active_cm3: active,
     })),
-    donors_cm3: doping.donors,
-    acceptors_cm3: doping.acceptors,
+    donors_cm3: flow.input.donors,
+    acceptors_cm3: flow.input.acceptors,
     net_cm3: doping.net,
     electrons_cm3: flow.input.electrons,
     holes_cm3: flow.input.holes,
+    potential_V: electrostatics?.potential ?? new Float64Array(count).fill(Number.NaN),
     electronMobility_cm2Vs: flow.electronMobility,
     holeMobility_cm2Vs: flow.holeMobility,
     latticeMobility_cm2Vs: lattice,

@@ -19,9 +19,13 @@ export type {
 export { type SolveOptions, solve } from './solve';
 export { sha256Hex } from './study/hash';
 export {
+  CARRIER_NAMES,
   DIFFUSIVITY_SETS,
+  IONISATION_NAMES,
   MOBILITY_NAMES,
+  NARROWING_NAMES,
   RANGE_SETS,
+  STATISTICS_NAMES,
   TABLE_DELIMITERS,
   TABLE_ENCODINGS,
 } from './study/names';

@@ -4,17 +4,20 @@ import type { Dopant } from './material/dopants';
 import type { MobilityName } from './study/names';
 import type { Warning } from './study/problem';
 import type { ActivationChoice } from './study/recipe';
+import type { Study } from './study/schema';
 
 export const RESULT_FORMAT = 'ohmstrata-result/1';
 
 export interface JunctionResult {
-  /** Sign change of net doping. */
-  metallurgical_um: number;
-  /** Where n = p; with neutral carriers the same depth. */
-  electrical_um: number;
+  /** Sign change of net doping; null where carriers alone make a junction, as under a charged surface. */
+  metallurgical_um: number | null;
+  /** Where n = p; with neutral carriers the same depth; null where a layer beside it is depleted and there is none. */
+  electrical_um: number | null;
   /** Edges of the depleted region and the built-in voltage; null with neutral carriers, which have neither. */
   depletion_um: [number, number] | null;
   builtIn_V: number | null;
+  /** Small-signal capacitance per area; permittivity over the distance of the two edges. */
+  capacitance_nFcm2: number | null;
 }
 
 export interface LayerResult {
@@ -26,6 +29,10 @@ export interface LayerResult {
   /** What ends the layer below. */
   bottomEdge: 'junction' | 'wafer' | 'buriedOxide';
   sheetResistance_ohmSq: number;
+  /** Lowest and highest sheet resistance by the published mobility models that apply here. */
+  sheetResistanceSpread_ohmSq: [number, number];
+  /** By each mobility model; those that do not apply here are in `models.unfit`. */
+  sheetResistanceByMobility_ohmSq: Record<MobilityName, number>;
   sheetConductance_S: number;
   /** Integral of |active donors - active acceptors|, and of the majority carriers. */
   netDose_cm2: number;
@@ -72,8 +79,14 @@ export interface ResultDocument {
   models: {
     mobility: MobilityName;
     mobilitySource: string;
-    carriers: 'neutral';
-    ionisation: 'complete';
+    carriers: Study['models']['carriers'];
+    /** What was used: a mobility model made from dopant densities implies `complete`. */
+    ionisation: Study['models']['ionisation'];
+    ionisationSource: string;
+    statistics: Study['models']['statistics'];
+    narrowing: Study['models']['narrowing'];
+    /** Mobility models that do not apply to this study, and why. */
+    unfit: Partial<Record<MobilityName, string>>;
     activation: ActivationChoice;
     intrinsic: string;
   };
@@ -98,12 +111,15 @@ export interface SolvedColumns {
   depth_um: Float64Array;
   /** Only the dopants that are present. */
   dopants: { dopant: Dopant; chemical_cm3: Float64Array; active_cm3: Float64Array }[];
+  /** Ionised: what carriers scatter at. */
   donors_cm3: Float64Array;
   acceptors_cm3: Float64Array;
   /** Active donors - active acceptors, with its sign. */
   net_cm3: Float64Array;
   electrons_cm3: Float64Array;
   holes_cm3: Float64Array;
+  /** From where n = p in undoped silicon; NaN with neutral carriers, which have none. */
+  potential_V: Float64Array;
   electronMobility_cm2Vs: Float64Array;
   holeMobility_cm2Vs: Float64Array;
   /** Parts of the majority carriers' mobility at each depth; NaN where the model has none. */

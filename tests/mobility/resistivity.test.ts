@@ -2,19 +2,28 @@ import { describe, expect, test } from 'vitest';
 import { concentrationOf, resistivityOf } from '../../src/core/material/mf723';
 import { uniformResistivity } from '../../src/core/mobility/resistivity';
 import { uniformSilicon } from '../../src/core/mobility/uniform';
-import { MOBILITY_NAMES } from '../../src/core/study/names';
+import { IONISATION_NAMES, MOBILITY_NAMES } from '../../src/core/study/names';
 import { NoSolution } from '../../src/core/study/problem';
 
 describe('resistivity of uniformly doped silicon', () => {
-  test.each(MOBILITY_NAMES)('by %s: from a concentration to the resistivity and back', (mobility) => {
+  test.each(
+    MOBILITY_NAMES.flatMap((name) => IONISATION_NAMES.map((ionisation) => [name, ionisation] as const)),
+  )('by %s, %s ionisation: from a concentration to the resistivity and back', (mobility, ionisation) => {
     for (const dopant of ['boron', 'phosphorus', 'arsenic'] as const)
       for (const concentration of [1e12, 1e15, 3e17, 1e19, 1.5e20]) {
-        const there = uniformResistivity({ dopant, concentration, temperature: 298.15, mobility });
+        const there = uniformResistivity({
+          dopant,
+          concentration,
+          temperature: 298.15,
+          mobility,
+          ionisation,
+        });
         const back = uniformResistivity({
           dopant,
           resistivity: there.resistivity,
           temperature: 298.15,
           mobility,
+          ionisation,
         });
         expect(Math.abs(back.concentration / concentration - 1)).toBeLessThan(1e-10);
         expect(back.mobility).toBeCloseTo(there.mobility, 6);
@@ -27,12 +36,18 @@ describe('resistivity of uniformly doped silicon', () => {
       concentration: 1e16,
       temperature: 300,
       mobility: 'arora',
+      ionisation: 'levels',
     });
     expect(answer.resistivity).toBe(uniformSilicon('boron', 1e16, 300, 'arora').resistivity);
   });
 
   test('stands beside the answer of the standard for the same question', () => {
-    const common = { dopant: 'phosphorus', temperature: 296.15, mobility: 'klaassen' } as const;
+    const common = {
+      dopant: 'phosphorus',
+      temperature: 296.15,
+      mobility: 'klaassen',
+      ionisation: 'levels',
+    } as const;
     expect(uniformResistivity({ ...common, concentration: 1e17 }).standard).toEqual(
       resistivityOf('phosphorus', 1e17),
     );
@@ -47,6 +62,7 @@ describe('resistivity of uniformly doped silicon', () => {
       concentration: 1e16,
       temperature: 480,
       mobility: 'masetti',
+      ionisation: 'complete',
     });
     expect(warnings.map(({ code }) => code)).toEqual(
       expect.arrayContaining(['intrinsic-range', 'mobility-range', 'mobility-borrowed']),
@@ -57,7 +73,13 @@ describe('resistivity of uniformly doped silicon', () => {
     '%d ohm cm is no resistivity silicon can have, and what can be reached is told',
     (resistivity) => {
       const ask = () =>
-        uniformResistivity({ dopant: 'boron', resistivity, temperature: 298.15, mobility: 'klaassen' });
+        uniformResistivity({
+          dopant: 'boron',
+          resistivity,
+          temperature: 298.15,
+          mobility: 'klaassen',
+          ionisation: 'levels',
+        });
       expect(ask).toThrow(NoSolution);
       expect(ask).toThrow(/from \S+ to \S+ ohm cm can be reached/);
     },
@@ -70,8 +92,15 @@ describe('resistivity of uniformly doped silicon', () => {
       concentration: 2e15,
       temperature: 500,
       mobility: 'klaassen',
+      ionisation: 'levels',
     });
-    const back = uniformResistivity({ dopant: 'boron', resistivity, temperature: 500, mobility: 'klaassen' });
+    const back = uniformResistivity({
+      dopant: 'boron',
+      resistivity,
+      temperature: 500,
+      mobility: 'klaassen',
+      ionisation: 'levels',
+    });
     expect(Math.abs(back.concentration / 2e15 - 1)).toBeLessThan(1e-10);
   });
 });

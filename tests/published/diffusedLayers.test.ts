@@ -28,7 +28,7 @@ function diffusedLayer(
           ? { step: 'erfc', dopant, surface_cm3: layer.surface_cm3, length_um: 1 }
           : { step: 'gaussian', dopant, peak_cm3: layer.surface_cm3, depth_um: 0, sigma_um: Math.SQRT1_2 },
       ],
-      models: { mobility },
+      models: { mobility, carriers: 'neutral', ionisation: 'complete' },
     }),
   );
   return result.layers[0];
@@ -67,7 +67,7 @@ describe('textbook layers', () => {
             sigma_um: 1.46 / Math.SQRT2 / 1,
           },
         ],
-        models: { mobility: 'mf723' },
+        models: { mobility: 'mf723', carriers: 'neutral' },
       }),
     );
     const [base] = result.layers;

@@ -7,6 +7,7 @@ import type { SampledDoping } from '../../src/core/profile/doping';
 import { conduction } from '../../src/core/sheet/conduction';
 import { type LayerReadings, layerReadings, layerSpans } from '../../src/core/sheet/layers';
 import { temperatureCoefficients } from '../../src/core/sheet/temperatureCoefficient';
+import { neutralChoice, neutralState } from '../support/carriers';
 import { dopingOf } from '../support/doping';
 
 const UM = 1e-4;
@@ -15,8 +16,9 @@ const klaassen = mobilityModel('klaassen');
 const none = () => 1; // 1 cm^-3: a mesh wants a positive total
 
 function readings(doping: SampledDoping, model = klaassen): LayerReadings[] {
-  const flow = conduction(doping, model, ROOM);
-  return layerSpans(doping, doping.junctions).map((span) => layerReadings(doping, flow, span));
+  const state = neutralState(doping);
+  const flow = conduction(state, model);
+  return layerSpans(state).map((span) => layerReadings(state, flow, span));
 }
 
 const first = (doping: SampledDoping, model = klaassen) => readings(doping, model)[0];
@@ -57,7 +59,7 @@ describe('layers', () => {
 
   test('are cut at the junctions and named by their majority', () => {
     const doping = dopingOf(() => 1e15, base, 525 * UM, [0.2 * UM]);
-    const spans = layerSpans(doping, doping.junctions);
+    const spans = layerSpans(neutralState(doping));
     expect(spans.map(({ type }) => type)).toEqual(['p', 'n']);
     expect(doping.depth[spans[0].to]).toBe(doping.depth[spans[1].from]);
   });
@@ -75,20 +77,18 @@ describe('layers', () => {
     const x = Float64Array.from({ length: count }, (_, i) => (depth * i) / (count - 1));
     const acceptors = x.map(base);
     const donors = x.map(() => 1e15);
-    const flow = conduction(
-      {
-        depth: x,
-        dopants: [
-          { dopant: 'phosphorus', active: donors },
-          { dopant: 'boron', active: acceptors },
-        ],
-        donors,
-        acceptors,
-        net: x.map((_, i) => donors[i] - acceptors[i]),
-      },
-      klaassen,
-      ROOM,
-    );
+    const dense: SampledDoping = {
+      depth: x,
+      dopants: [
+        { dopant: 'phosphorus', chemical: donors, active: donors },
+        { dopant: 'boron', chemical: acceptors, active: acceptors },
+      ],
+      donors,
+      acceptors,
+      net: x.map((_, i) => donors[i] - acceptors[i]),
+      junctions: [],
+    };
+    const flow = conduction(neutralState(dense), klaassen);
     let reference = 0;
     for (let i = 1; i < count; i++)
       reference += ((x[i] - x[i - 1]) * (flow.conductivity[i] + flow.conductivity[i - 1])) / 2;
@@ -164,15 +164,17 @@ describe('the temperature coefficient', () => {
   test('of a lightly doped film is that of the lattice mobility', () => {
     // Klaassen's lattice mobility falls as T^-2.285; impurities at 1e14 take about 1 % of it.
     const doping = dopingOf(() => 1e14, none, 10 * UM);
-    const [coefficient] = temperatureCoefficients(doping, klaassen, 300, layerSpans(doping, []));
+    const state = neutralState(doping, 300);
+    const [coefficient] = temperatureCoefficients(state, neutralChoice(300), klaassen, layerSpans(state));
     expect((coefficient as number) * 300).toBeCloseTo(2.285, 1);
   });
 
   test('is not invented for a model of one temperature', () => {
     const doping = dopingOf(() => 1e17, none, UM);
-    expect(temperatureCoefficients(doping, mobilityModel('masetti'), 300, layerSpans(doping, []))).toEqual([
-      null,
-    ]);
+    const state = neutralState(doping, 300);
+    expect(
+      temperatureCoefficients(state, neutralChoice(300), mobilityModel('masetti'), layerSpans(state)),
+    ).toEqual([null]);
   });
 });
 

@@ -3,18 +3,20 @@
 import type { SampledDoping } from '../../src/core/profile/doping';
 import { buildMesh } from '../../src/core/profile/mesh';
 
-/** Phosphorus and boron given as functions of depth (cm), sampled from the surface to `end`. */
+/** Phosphorus and boron given as functions of depth (cm), sampled from the surface to `end`; `jumps` are where
+ * they are discontinuous. */
 export function dopingOf(
   phosphorus: (depth: number) => number,
   boron: (depth: number) => number,
   end: number,
   marks: number[] = [],
   refinement = 1,
+  jumps: number[] = [],
 ): SampledDoping {
   const mesh = buildMesh({
     end,
     marks,
-    jumps: [],
+    jumps,
     refinement,
     sample: (depth) => {
       const [donors, acceptors] = [phosphorus(depth), boron(depth)];

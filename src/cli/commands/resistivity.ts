@@ -1,7 +1,13 @@
 /** `resistivity`: uniformly doped silicon, from its dopant concentration to its resistivity or back. */
 
 import { Command, Option } from 'commander';
-import { type Dopant, InputProblem, MOBILITY_MODELS, uniformResistivity } from '../../core/index';
+import {
+  type Dopant,
+  InputProblem,
+  IONISATION_NAMES,
+  MOBILITY_MODELS,
+  uniformResistivity,
+} from '../../core/index';
 import { dopant, quantity } from '../options';
 import { answer, figure, json, pairs, tellWarnings } from '../text';
 
@@ -13,6 +19,7 @@ interface Options {
   resistivity?: number;
   temperature: number;
   mobility: MobilityName;
+  ionisation: 'levels' | 'complete';
   json?: boolean;
 }
 
@@ -22,17 +29,21 @@ export function resistivityCommand(): Command {
   return new Command('resistivity')
     .description('Resistivity of uniformly doped silicon from its dopant concentration, or the reverse.')
     .requiredOption('--dopant <dopant>', 'by name or symbol', dopant)
-    .option(
-      '--concentration <cm-3>',
-      'dopant atoms, all ionised',
-      quantity('concentration', 'cm-3', 1e8, 1e21),
-    )
+    .option('--concentration <cm-3>', 'active dopant atoms', quantity('concentration', 'cm-3', 1e8, 1e21))
     .option('--resistivity <ohm cm>', 'resistivity to reach', quantity('resistivity', 'ohm cm', 1e-6, 1e7))
     .option('--temperature <C>', 'temperature', quantity('temperature', 'C', -73.15, 226.85), 25)
     .addOption(
       new Option('--mobility <model>', 'mobility model')
         .choices(MOBILITY_MODELS.map(({ name }) => name))
         .default('klaassen'),
+    )
+    .addOption(
+      new Option(
+        '--ionisation <model>',
+        'which part of the dopant is ionised; models made from dopants take all',
+      )
+        .choices(IONISATION_NAMES)
+        .default('levels'),
     )
     .option('--json', 'print a JSON document')
     .addHelpText(
@@ -64,6 +75,7 @@ Examples:
             dopant: options.dopant,
             temperature_C: options.temperature,
             mobility: options.mobility,
+            ionisation: options.ionisation,
             ...values,
             [standard]: mf723.value,
             mf723InRange: mf723.inRange,

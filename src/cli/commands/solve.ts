@@ -72,6 +72,7 @@ function layers({ layers: all }: ResultDocument): string {
       'from_um',
       'to_um',
       'sheet_ohmSq',
+      'by models_ohmSq',
       'mean_ohmCm',
       'carriers_cm2',
       'mobility_cm2Vs',
@@ -86,6 +87,7 @@ function layers({ layers: all }: ResultDocument): string {
       figure(layer.top_um),
       figure(layer.bottom_um),
       figure(layer.sheetResistance_ohmSq),
+      layer.sheetResistanceSpread_ohmSq.map((value) => figure(value)).join(' to '),
       figure(layer.meanResistivity_ohmCm),
       figure(layer.carrierDose_cm2),
       figure(layer.conductivityMobility_cm2Vs),
@@ -100,8 +102,15 @@ function layers({ layers: all }: ResultDocument): string {
 
 function junctions({ junctions: all }: ResultDocument): string {
   return table(
-    ['junction', 'metallurgical_um', 'electrical_um'],
-    all.map((junction, i) => [`${i + 1}`, figure(junction.metallurgical_um), figure(junction.electrical_um)]),
+    ['junction', 'metallurgical_um', 'electrical_um', 'depleted_um', 'builtIn_V', 'capacitance_nFcm2'],
+    all.map((junction, i) => [
+      `${i + 1}`,
+      figure(junction.metallurgical_um),
+      figure(junction.electrical_um),
+      junction.depletion_um?.map((um) => figure(um)).join(' to ') ?? '-',
+      figure(junction.builtIn_V, 3),
+      figure(junction.capacitance_nFcm2),
+    ]),
   );
 }
 

@@ -1,7 +1,10 @@
 /** What is to be said about the carriers at a temperature. */
 
 import { INTRINSIC_RANGE, INTRINSIC_SOURCE } from '../material/intrinsic';
+import type { SampledDoping } from '../profile/doping';
 import type { Warning } from '../study/problem';
+import type { CarrierChoice } from './carriers';
+import { hasLevel } from './ionisation';
 
 /** A remark when `temperature` (K) lies outside the measurements behind the intrinsic density. */
 export function intrinsicWarnings(temperature: number): Warning[] {
@@ -13,4 +16,31 @@ export function intrinsicWarnings(temperature: number): Warning[] {
       message: `intrinsic density at ${temperature.toFixed(1)} K is extrapolated: ${INTRINSIC_SOURCE} measured ${low} to ${high} K`,
     },
   ];
+}
+
+/** What is to be said of how the carriers were found; `asked` is the ionisation the study names. */
+export function carrierWarnings(
+  { carriers, ionisation, temperature, reverseBias }: CarrierChoice,
+  asked: 'complete' | 'levels',
+  doping: SampledDoping,
+): Warning[] {
+  const warnings = intrinsicWarnings(temperature);
+  if (asked === 'levels' && ionisation === 'complete')
+    warnings.push({
+      code: 'ionisation-implied',
+      message: 'this mobility model was made from dopant densities: all active dopants are taken as ionised',
+    });
+  if (ionisation === 'levels')
+    for (const { dopant } of doping.dopants)
+      if (!hasLevel(dopant))
+        warnings.push({
+          code: 'ionisation-no-level',
+          message: `no published level of ${dopant} is known here: all of it is taken as ionised`,
+        });
+  if (carriers === 'neutral' && reverseBias.some((volts) => volts > 0))
+    warnings.push({
+      code: 'bias-neutral',
+      message: 'neutral carriers know no bias: reverseBias_V has no effect with models.carriers "neutral"',
+    });
+  return warnings;
 }

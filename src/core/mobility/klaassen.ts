@@ -82,7 +82,7 @@ export const klaassen: MobilityModel = {
   name: 'klaassen',
   title: 'Klaassen 1992 (unified)',
   source: 'D. B. M. Klaassen, Solid-State Electronics 35, 953 and 961 (1992)',
-  argument: 'ionised donors and acceptors, electrons and holes',
+  argument: 'carriers',
   range: { concentration: [1e13, 1e21], temperature: [77, 500] },
   dependsOnTemperature: true,
   hasParts: true,

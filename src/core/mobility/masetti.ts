@@ -61,7 +61,8 @@ export const masetti: MobilityModel = {
   name: 'masetti',
   title: 'Masetti 1983',
   source: 'G. Masetti, M. Severi, S. Solmi, IEEE Trans. Electron Devices ED-30, 764 (1983)',
-  argument: 'carriers; taken at the total of ionised impurities',
+  /** Taken at the total of ionised impurities. */
+  argument: 'carriers',
   range: { concentration: [1e13, 5e21], temperature: ROOM_300_K },
   dependsOnTemperature: false,
   hasParts: true,

@@ -42,8 +42,11 @@ export interface MobilityModel {
   readonly title: string;
   /** Author, year, journal, pages. */
   readonly source: string;
-  /** What the published argument is: carriers or dopants. */
-  readonly argument: string;
+  /**
+   * What the published argument is. A model of dopants was made from resistivities by taking every dopant for a carrier, so that
+   * it must be used with complete ionisation; one of carriers takes what is ionised.
+   */
+  readonly argument: 'dopants' | 'carriers';
   /** What is known to be wrong with the model even inside its range. */
   readonly caution?: string;
   /** Published ranges; outside them the value is still given, with a warning. cm^-3, K. */
@@ -59,4 +62,9 @@ export interface MobilityModel {
   readonly ownDopants: readonly Dopant[];
   /** Fills `output` for every depth. Allocates nothing that grows with depth. */
   evaluate(input: MobilityInput, output: MobilityOutput): void;
+}
+
+/** The ionisation to use with a model when `wanted` is asked for. */
+export function ionisationFor(model: MobilityModel, wanted: 'complete' | 'levels'): 'complete' | 'levels' {
+  return model.argument === 'dopants' ? 'complete' : wanted;
 }

@@ -19,6 +19,7 @@ export interface ResistivityQuestion {
   /** K */
   readonly temperature: number;
   readonly mobility: MobilityName;
+  readonly ionisation: 'complete' | 'levels';
 }
 
 export interface ResistivityAnswer {
@@ -43,25 +44,33 @@ const LOWEST_DOPING = 2;
 const STEPS_PER_DECADE = 10;
 
 /**
- * The uniform piece of silicon that has a concentration or a resistivity; all dopants are ionised.
+ * The uniform piece of silicon that has a concentration of active dopant or a resistivity.
  * @throws NoSolution when no doping between twice the intrinsic density and 1e21 cm^-3 has the resistivity.
  */
 export function uniformResistivity(question: ResistivityQuestion): ResistivityAnswer {
-  const { dopant, temperature, mobility, resistivity: wanted } = question;
+  const { dopant, temperature, mobility, ionisation, resistivity: wanted } = question;
   const concentration = question.concentration ?? concentrationFor(question);
-  const input = uniformInput({ dopant, concentration, temperature });
+  const input = uniformInput({ dopant, concentration, temperature, ionisation });
   return {
     concentration,
-    ...uniformSilicon(dopant, concentration, temperature, mobility),
+    ...uniformSilicon(dopant, concentration, temperature, mobility, ionisation),
     standard: wanted === undefined ? resistivityOf(dopant, concentration) : concentrationOf(dopant, wanted),
     warnings: [...intrinsicWarnings(temperature), ...mobilityWarnings(mobilityModel(mobility), input)],
   };
 }
 
 /** The lightest doping that has the resistivity: the models are followed upwards until they cross it. */
-function concentrationFor({ dopant, resistivity = 0, temperature, mobility }: ResistivityQuestion): number {
+function concentrationFor({
+  dopant,
+  resistivity = 0,
+  temperature,
+  mobility,
+  ionisation,
+}: ResistivityQuestion): number {
   const excess = (logN: number): number =>
-    Math.log(uniformSilicon(dopant, Math.exp(logN), temperature, mobility).resistivity / resistivity);
+    Math.log(
+      uniformSilicon(dopant, Math.exp(logN), temperature, mobility, ionisation).resistivity / resistivity,
+    );
   const low = Math.log(LOWEST_DOPING * intrinsicDensity(temperature));
   const high = Math.log(HIGHEST_CONCENTRATION);
   const steps = Math.ceil(((high - low) / Math.LN10) * STEPS_PER_DECADE);

@@ -1,19 +1,20 @@
 /** Mobility and resistivity of a uniformly doped piece of silicon, by any of the models. */
 
-import { neutralCarriers } from '../carriers/neutral';
+import { ChargeModel } from '../carriers/charge';
 import { ELEMENTARY_CHARGE } from '../material/constants';
 import { DOPANT_FACTS, type Dopant } from '../material/dopants';
-import { intrinsicDensity } from '../material/intrinsic';
 import type { MobilityName } from '../study/names';
 import { mobilityModel } from './list';
-import type { MobilityInput, MobilityModel } from './model';
+import { ionisationFor, type MobilityInput, type MobilityModel } from './model';
 
 export interface UniformDoping {
   readonly dopant: Dopant;
-  /** cm^-3, all ionised */
+  /** cm^-3 of active dopant */
   readonly concentration: number;
   /** K */
   readonly temperature: number;
+  /** `complete` unless stated. */
+  readonly ionisation?: 'complete' | 'levels';
 }
 
 export interface UniformMobility {
@@ -27,19 +28,27 @@ export interface UniformMobility {
 }
 
 /** The model's input for one depth of uniformly doped, neutral silicon. */
-export function uniformInput({ dopant, concentration, temperature }: UniformDoping): MobilityInput {
+export function uniformInput({
+  dopant,
+  concentration,
+  temperature,
+  ionisation = 'complete',
+}: UniformDoping): MobilityInput {
   const isDonor = DOPANT_FACTS[dopant].role === 'donor';
-  const column = Float64Array.of(concentration);
+  const active = Float64Array.of(concentration);
   const none = Float64Array.of(0);
-  const part = [{ dopant, ionised: column }];
-  const electrons = new Float64Array(1);
-  const holes = new Float64Array(1);
-  const net = Float64Array.of(isDonor ? concentration : -concentration);
-  neutralCarriers(net, intrinsicDensity(temperature), electrons, holes);
+  const charges = new ChargeModel(
+    { dopants: [{ dopant, active }], donors: isDonor ? active : none, acceptors: isDonor ? none : active },
+    { temperature, ionisation, statistics: 'boltzmann', narrowing: 'none' },
+  );
+  charges.neutralPotential(new Float64Array(1), 1e-12);
+  const { electrons, holes } = charges;
+  const [ionised] = charges.ionised();
+  const part = [{ dopant, ionised }];
   return {
     temperature,
-    donors: isDonor ? column : none,
-    acceptors: isDonor ? none : column,
+    donors: isDonor ? ionised : none,
+    acceptors: isDonor ? none : ionised,
     electrons,
     holes,
     donorParts: isDonor ? part : [],
@@ -63,18 +72,20 @@ export function mobilityAt(model: MobilityModel, doping: UniformDoping): Uniform
 
 /**
  * Resistivity (Ohm cm, by both carriers), majority mobility (cm^2/Vs) and carriers (cm^-3) of silicon uniformly doped with
- * one completely ionised dopant.
+ * one dopant; `ionisation` is what a model of carriers is given, a model of dopants takes them all as ionised.
  */
 export function uniformSilicon(
   dopant: Dopant,
   concentration_cm3: number,
   temperature_K: number,
   modelName: MobilityName,
+  ionisation: 'complete' | 'levels' = 'complete',
 ): { resistivity: number; mobility: number; electrons: number; holes: number } {
   const at = mobilityAt(mobilityModel(modelName), {
     dopant,
     concentration: concentration_cm3,
     temperature: temperature_K,
+    ionisation: ionisationFor(mobilityModel(modelName), ionisation),
   });
   const { electrons, holes } = at;
   return {

@@ -1,21 +1,9 @@
-/** Carriers, mobility and conductivity at every depth, from the active dopants there and the temperature. */
+/** Mobility and conductivity at every depth, from the carriers and the ionised dopants there. */
 
-import { neutralCarriers } from '../carriers/neutral';
+import type { CarrierState } from '../carriers/state';
 import { ELEMENTARY_CHARGE } from '../material/constants';
-import { DOPANT_FACTS, type Dopant } from '../material/dopants';
-import { intrinsicDensity } from '../material/intrinsic';
+import { DOPANT_FACTS, type DopantRole } from '../material/dopants';
 import type { DopantColumn, MobilityInput, MobilityModel, MobilityParts } from '../mobility/model';
-
-/** Active dopants on the mesh; all columns of one length, cm and cm^-3. */
-export interface ActiveDoping {
-  readonly depth: Float64Array;
-  /** Only dopants that are present. */
-  readonly dopants: readonly { readonly dopant: Dopant; readonly active: Float64Array }[];
-  readonly donors: Float64Array;
-  readonly acceptors: Float64Array;
-  /** donors - acceptors, exactly 0 at a junction. */
-  readonly net: Float64Array;
-}
 
 /** What conducts at each depth: cm^-3, cm^2/Vs, S/cm. */
 export interface Conduction {
@@ -27,20 +15,20 @@ export interface Conduction {
   readonly conductivity: Float64Array;
 }
 
-/** Conduction of neutral silicon with all active dopants ionised, at `temperature` (K). */
-export function conduction(doping: ActiveDoping, model: MobilityModel, temperature: number): Conduction {
-  const count = doping.depth.length;
+export function conduction(state: CarrierState, model: MobilityModel): Conduction {
+  const { electrons, holes, temperature } = state;
+  const count = electrons.length;
   const column = () => new Float64Array(count);
-  const [electrons, holes] = [column(), column()];
-  neutralCarriers(doping.net, intrinsicDensity(temperature), electrons, holes);
+  const donorParts = partsOf(state, 'donor');
+  const acceptorParts = partsOf(state, 'acceptor');
   const input: MobilityInput = {
     temperature,
-    donors: doping.donors,
-    acceptors: doping.acceptors,
+    donors: summed(donorParts, count),
+    acceptors: summed(acceptorParts, count),
     electrons,
     holes,
-    donorParts: partsOf(doping, 'donor'),
-    acceptorParts: partsOf(doping, 'acceptor'),
+    donorParts,
+    acceptorParts,
   };
   const electronParts = { lattice: column(), impurity: column() };
   const holeParts = { lattice: column(), impurity: column() };
@@ -52,8 +40,13 @@ export function conduction(doping: ActiveDoping, model: MobilityModel, temperatu
   return { input, electronMobility, holeMobility, electronParts, holeParts, conductivity };
 }
 
-function partsOf(doping: ActiveDoping, role: 'donor' | 'acceptor'): DopantColumn[] {
-  return doping.dopants
-    .filter(({ dopant }) => DOPANT_FACTS[dopant].role === role)
-    .map(({ dopant, active }) => ({ dopant, ionised: active }));
+function partsOf({ ionised }: CarrierState, role: DopantRole): DopantColumn[] {
+  return ionised.filter(({ dopant }) => DOPANT_FACTS[dopant].role === role);
+}
+
+function summed(parts: readonly DopantColumn[], count: number): Float64Array {
+  if (parts.length === 1) return parts[0].ionised;
+  const sum = new Float64Array(count);
+  for (const { ionised } of parts) for (let i = 0; i < count; i++) sum[i] += ionised[i];
+  return sum;
 }

@@ -1,14 +1,17 @@
 /**
- * Layers between junctions and what a sheet measurement reads of each.
+ * Layers between junctions and what a sheet measurement reads of each. In a layer that carriers spill out of or into, net doping
+ * counts with the sign of the layer, so that doping of the other sign is taken off.
  *
  * Sheet conductance G = q Int (n mu_n + p mu_p) dx, sheet resistance 1/G. Hall averages of the majority carriers (density c,
  * mobility mu): dose (Int c mu)^2 / Int c mu^2, mobility Int c mu^2 / Int c mu, Hall factor 1: the two-layer-network
  * average of R. L. Petritz, Phys. Rev. 110, 1254 (1958) taken to a continuum (from memory).
  */
 
+import type { CarrierState } from '../carriers/state';
 import { ELEMENTARY_CHARGE } from '../material/constants';
 import { integrate } from '../numeric/simpson';
-import type { ActiveDoping, Conduction } from './conduction';
+import type { SampledDoping } from '../profile/doping';
+import type { Conduction } from './conduction';
 
 /** Where a layer is flat to rounding, its peak is the shallowest depth: later nodes must be higher by this factor. */
 const FLAT = 1 + 1e-9;
@@ -33,12 +36,12 @@ export interface LayerReadings {
   readonly peakDepth: number;
 }
 
-/** The layers from the surface down, cut at the junctions (positions of nodes). */
-export function layerSpans(doping: ActiveDoping, junctions: readonly number[]): LayerSpan[] {
-  const bounds = [0, ...junctions, doping.depth.length - 1];
+/** The layers from the surface down, between the cuts where one kind of carrier takes over from the other. */
+export function layerSpans({ cuts, electrons, holes }: CarrierState): LayerSpan[] {
+  const bounds = [0, ...cuts, electrons.length - 1];
   return bounds.slice(1).map((to, i) => {
     const from = bounds[i];
-    return { from, to, type: doping.net[from + 1] > 0 ? 'n' : 'p' };
+    return { from, to, type: electrons[from + 1] > holes[from + 1] ? 'n' : 'p' };
   });
 }
 
@@ -48,8 +51,9 @@ export function sheetConductance(depth: Float64Array, conductivity: Float64Array
 }
 
 /** All readings of one layer. */
-export function layerReadings(doping: ActiveDoping, flow: Conduction, span: LayerSpan): LayerReadings {
+export function layerReadings({ doping }: CarrierState, flow: Conduction, span: LayerSpan): LayerReadings {
   const { from, to, type } = span;
+  const sign = type === 'n' ? 1 : -1;
   const carriers = type === 'n' ? flow.input.electrons : flow.input.holes;
   const mobility = type === 'n' ? flow.electronMobility : flow.holeMobility;
   const work = new Float64Array(doping.depth.length);
@@ -63,23 +67,28 @@ export function layerReadings(doping: ActiveDoping, flow: Conduction, span: Laye
   const hall = total((i) => carriers[i] * mobility[i] * mobility[i]);
   return {
     sheetConductance: conductance,
-    netDose: total((i) => Math.abs(doping.net[i])),
+    netDose: total((i) => sign * doping.net[i]),
     carrierDose,
     conductivityMobility: conductance / (ELEMENTARY_CHARGE * carrierDose),
     hallMobility: hall / drift,
     hallDose: (drift * drift) / hall,
-    surfaceNet: Math.abs(doping.net[from]),
-    ...peak(doping, span),
+    surfaceNet: sign * doping.net[from],
+    ...peak(doping, span, sign),
   };
 }
 
 /** The largest net doping of the layer and its depth, by the parabola of ln|net| through the three highest nodes. */
-function peak({ depth, net }: ActiveDoping, { from, to }: LayerSpan): { peakNet: number; peakDepth: number } {
+function peak(
+  { depth, net }: SampledDoping,
+  { from, to }: LayerSpan,
+  sign: 1 | -1,
+): { peakNet: number; peakDepth: number } {
+  const at = (i: number) => sign * net[i];
   let top = from;
-  for (let i = from; i <= to; i++) if (Math.abs(net[i]) > Math.abs(net[top]) * FLAT) top = i;
-  const node = { peakNet: Math.abs(net[top]), peakDepth: depth[top] };
-  if (top <= from || top >= to || net[top - 1] === 0 || net[top + 1] === 0) return node;
-  const [a, b, c] = [top - 1, top, top + 1].map((i) => Math.log(Math.abs(net[i])));
+  for (let i = from; i <= to; i++) if (at(i) > at(top) * FLAT) top = i;
+  const node = { peakNet: at(top), peakDepth: depth[top] };
+  if (top <= from || top >= to || !(at(top - 1) > 0 && at(top + 1) > 0)) return node;
+  const [a, b, c] = [top - 1, top, top + 1].map((i) => Math.log(at(i)));
   const [ha, hc] = [depth[top] - depth[top - 1], depth[top + 1] - depth[top]];
   const slopeBefore = (b - a) / ha;
   const slopeAfter = (c - b) / hc;

@@ -3,6 +3,18 @@
 export const MOBILITY_NAMES = ['klaassen', 'masetti', 'arora', 'caughey-thomas', 'mf723'] as const;
 export type MobilityName = (typeof MOBILITY_NAMES)[number];
 
+/** `poisson`: electrostatic equilibrium through the whole stack; `neutral`: no charge anywhere. */
+export const CARRIER_NAMES = ['poisson', 'neutral'] as const;
+
+/** `levels`: dopant levels that move into the band as doping grows; `complete`: every active dopant is ionised. */
+export const IONISATION_NAMES = ['levels', 'complete'] as const;
+
+export const STATISTICS_NAMES = ['boltzmann', 'fermi-dirac'] as const;
+
+/** Published apparent band-gap narrowing. */
+export const NARROWING_NAMES = ['none', 'slotboom1976', 'klaassen1992'] as const;
+export type NarrowingName = (typeof NARROWING_NAMES)[number];
+
 /** `universal`: fits of transport moments with the universal potential; `lss1975`: the tables of 1975. */
 export const RANGE_SETS = ['universal', 'lss1975'] as const;
 export type RangeSet = (typeof RANGE_SETS)[number];

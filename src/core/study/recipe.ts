@@ -4,7 +4,7 @@
  */
 
 import type { Dopant, ImplantSpecies } from '../material/dopants';
-import type { DiffusivitySet, MobilityName, RangeSet } from './names';
+import type { DiffusivitySet, MobilityName, NarrowingName, RangeSet } from './names';
 
 interface Numbered {
   /** Position in the document, counted from 1, disabled steps included. */
@@ -108,5 +108,13 @@ export interface Recipe {
     readonly mobility: MobilityName;
     readonly activation: ActivationChoice;
     readonly diffusivity: DiffusivitySet;
+    readonly carriers: 'poisson' | 'neutral';
+    readonly ionisation: 'levels' | 'complete';
+    readonly statistics: 'boltzmann' | 'fermi-dirac';
+    readonly narrowing: NarrowingName;
   };
+  /** Charge on the surface, cm^-2 of q, or its potential, V. */
+  readonly surface: { readonly charge: number } | { readonly potential: number };
+  /** V, by metallurgical junction from the surface down. */
+  readonly reverseBias: readonly number[];
 }

@@ -5,7 +5,11 @@ import type { Study, StudyStep } from './schema';
 
 /** Problems that lie between the keys of an otherwise valid study. */
 export function crossFieldProblems(study: Study): StudyProblem[] {
-  return [...waferProblems(study), ...study.steps.flatMap((step, i) => stepProblems(step, `steps[${i}]`))];
+  return [
+    ...waferProblems(study),
+    ...surfaceProblems(study),
+    ...study.steps.flatMap((step, i) => stepProblems(step, `steps[${i}]`)),
+  ];
 }
 
 function waferProblems({ wafer }: Study): StudyProblem[] {
@@ -22,6 +26,18 @@ function waferProblems({ wafer }: Study): StudyProblem[] {
       message: `found ${wafer.buriedOxide_um}; it must lie within the wafer's ${wafer.thickness_um} um`,
     });
   return problems;
+}
+
+function surfaceProblems({ surface }: Study): StudyProblem[] {
+  if (!surface) return [];
+  const given = [surface.charge_cm2, surface.potential_V].filter((value) => value !== undefined);
+  if (given.length === 1) return [];
+  return [
+    {
+      key: 'surface',
+      message: `the surface is ${given.length === 0 ? 'not stated' : 'stated twice'}; give either charge_cm2 or potential_V, or leave surface out`,
+    },
+  ];
 }
 
 function stepProblems(step: StudyStep, key: string): StudyProblem[] {

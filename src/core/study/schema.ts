@@ -7,7 +7,17 @@
 
 import { z } from 'zod';
 import { DOPANTS, IMPLANT_SPECIES } from '../material/dopants';
-import { DIFFUSIVITY_SETS, MOBILITY_NAMES, RANGE_SETS, TABLE_DELIMITERS, TABLE_ENCODINGS } from './names';
+import {
+  CARRIER_NAMES,
+  DIFFUSIVITY_SETS,
+  IONISATION_NAMES,
+  MOBILITY_NAMES,
+  NARROWING_NAMES,
+  RANGE_SETS,
+  STATISTICS_NAMES,
+  TABLE_DELIMITERS,
+  TABLE_ENCODINGS,
+} from './names';
 
 export const STUDY_FORMAT = 'ohmstrata-study/1';
 
@@ -156,11 +166,21 @@ const wafer = z.strictObject({
 const fraction = between(0, 1);
 const models = z.strictObject({
   mobility: z.enum(MOBILITY_NAMES).default('klaassen'),
-  carriers: z.enum(['neutral']).default('neutral'),
-  ionisation: z.enum(['complete']).default('complete'),
+  carriers: z.enum(CARRIER_NAMES).default('poisson'),
+  ionisation: z.enum(IONISATION_NAMES).default('levels'),
+  statistics: z.enum(STATISTICS_NAMES).default('boltzmann'),
+  narrowing: z.enum(NARROWING_NAMES).default('none'),
   activation: z.union([z.enum(['full', 'solubility']), z.partialRecord(dopant, fraction)]).default('full'),
   ranges: z.enum(RANGE_SETS).default('universal'),
   diffusivity: z.enum(DIFFUSIVITY_SETS).default('fair1981'),
+});
+
+/** What the surface does to the carriers below; without it there is no field. One of the two keys. */
+const surface = z.strictObject({
+  /** Fixed charges of an oxide on the surface, in elementary charges. */
+  charge_cm2: between(-1e14, 1e14).optional(),
+  /** The surface's potential against neutral silicon there. */
+  potential_V: between(-2, 2).optional(),
 });
 
 const measurement = z.strictObject({
@@ -179,6 +199,9 @@ export const studySchema = z.strictObject({
   wafer,
   steps: z.array(stepSchema).max(MAX_STEPS).default([]),
   models: models.prefault({}),
+  surface: surface.optional(),
+  /** Reverse voltage of each metallurgical junction from the surface down. */
+  reverseBias_V: z.array(between(0, 1000)).max(100).optional(),
   measurements: z.array(measurement).max(1000).optional(),
 });
 

@@ -33,7 +33,16 @@ export function toRecipe(study: Study): Recipe {
       mobility: models.mobility,
       activation: models.activation,
       diffusivity: models.diffusivity,
+      carriers: models.carriers,
+      ionisation: models.ionisation,
+      statistics: models.statistics,
+      narrowing: models.narrowing,
     },
+    surface:
+      study.surface?.potential_V === undefined
+        ? { charge: study.surface?.charge_cm2 ?? 0 }
+        : { potential: study.surface.potential_V },
+    reverseBias: study.reverseBias_V ?? [],
   };
 }
 

@@ -51,6 +51,7 @@ export function LayerCard({ layer, result }: Props) {
         shown={digits(layer.sheetResistance_ohmSq)}
         unit="Ω/sq"
       />
+      <p class="spread">{spreadInWords(layer)}</p>
       {measured.map((each, i) => (
         <Measured key={i} {...each} />
       ))}
@@ -82,4 +83,11 @@ function differenceInWords(percent: number | null, sigma: number | null): string
   const side = percent >= 0 ? 'above' : 'below';
   const inSigma = sigma === null ? '' : ` (${digits(Math.abs(sigma), 2)} σ)`;
   return `${digits(Math.abs(percent), 2)} % ${side} the prediction${inSigma}`;
+}
+
+/** How far the published mobility models agree, so that nobody reads four digits where the literature has two. */
+function spreadInWords({ sheetResistanceSpread_ohmSq: [low, high] }: LayerResult): string {
+  const percent = (100 * (high - low)) / low;
+  if (percent < 0.1) return 'the mobility models that apply agree';
+  return `${digits(low)} to ${digits(high)} Ω/sq by the mobility models that apply (${digits(percent, 2)} %)`;
 }

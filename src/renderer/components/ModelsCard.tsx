@@ -2,6 +2,12 @@
 
 import { DOPANT_FACTS, MOBILITY_MODELS, type Study } from '../../core/index';
 import { withStudy } from '../state/draft';
+import {
+  CARRIER_OPTIONS,
+  IONISATION_OPTIONS,
+  NARROWING_OPTIONS,
+  STATISTICS_OPTIONS,
+} from '../state/modelOptions';
 import { DIFFUSIVITY_OPTIONS, RANGE_OPTIONS } from '../state/stepFields';
 import { edit, shownDopants, study } from '../state/studySession';
 import { Card } from './Card';
@@ -29,6 +35,20 @@ export function ModelsCard() {
         options={MOBILITY_MODELS.map(({ name, title }) => ({ value: name, name: title }))}
         chosen={models.mobility}
         choose={(name) => setModel('mobility', 'mobility model', name as Models['mobility'])}
+      />
+      <ChoiceField
+        path="models.carriers"
+        label="Carriers"
+        options={CARRIER_OPTIONS}
+        chosen={models.carriers}
+        choose={(name) => setModel('carriers', 'how carriers are found', name as Models['carriers'])}
+      />
+      <ChoiceField
+        path="models.ionisation"
+        label="Ionisation"
+        options={IONISATION_OPTIONS}
+        chosen={models.ionisation}
+        choose={(name) => setModel('ionisation', 'ionisation', name as Models['ionisation'])}
       />
       <ChoiceField
         path="models.activation"
@@ -73,6 +93,20 @@ export function ModelsCard() {
         options={DIFFUSIVITY_OPTIONS}
         chosen={models.diffusivity}
         choose={(name) => setModel('diffusivity', 'diffusivities', name as Models['diffusivity'])}
+      />
+      <ChoiceField
+        path="models.statistics"
+        label="Statistics"
+        options={STATISTICS_OPTIONS}
+        chosen={models.statistics}
+        choose={(name) => setModel('statistics', 'carrier statistics', name as Models['statistics'])}
+      />
+      <ChoiceField
+        path="models.narrowing"
+        label="Narrowing"
+        options={NARROWING_OPTIONS}
+        chosen={models.narrowing}
+        choose={(name) => setModel('narrowing', 'band-gap narrowing', name as Models['narrowing'])}
       />
       {model && <p class="card-note">{model.source}</p>}
     </Card>

@@ -61,14 +61,71 @@ function Junctions({ junctions }: { junctions: readonly JunctionResult[] }) {
         <p class="card-note">None: the wafer is one layer.</p>
       ) : (
         <ol class="junctions">
-          {junctions.map(({ metallurgical_um: um }) => (
-            <li key={um}>
-              <Copyable name="Junction depth in µm" value={um} shown={depthDigits(um)} unit="µm" />
-            </li>
+          {junctions.map((junction) => (
+            <Junction key={junction.electrical_um ?? junction.metallurgical_um} {...junction} />
           ))}
         </ol>
       )}
     </section>
+  );
+}
+
+function Junction(junction: JunctionResult) {
+  const { electrical_um, metallurgical_um, depletion_um, builtIn_V, capacitance_nFcm2 } = junction;
+  const depth = (name: string, um: number | null) => (
+    <>
+      <dt>{name}</dt>
+      <dd>
+        <Copyable
+          name={`${name} in µm`}
+          value={um}
+          shown={um === null ? 'none' : depthDigits(um)}
+          unit="µm"
+        />
+      </dd>
+    </>
+  );
+  return (
+    <li>
+      <dl class="figures">
+        {depth('n = p at', electrical_um)}
+        {metallurgical_um !== electrical_um && depth('doping changes sign at', metallurgical_um)}
+        {depletion_um && (
+          <>
+            <dt>depleted</dt>
+            <dd>
+              {depthDigits(depletion_um[0])}–{depthDigits(depletion_um[1])} <span class="unit">µm</span>
+            </dd>
+          </>
+        )}
+        {capacitance_nFcm2 !== null && (
+          <>
+            <dt>capacitance</dt>
+            <dd>
+              <Copyable
+                name="Junction capacitance in nF/cm²"
+                value={capacitance_nFcm2}
+                shown={digits(capacitance_nFcm2)}
+                unit="nF/cm²"
+              />
+            </dd>
+          </>
+        )}
+        {builtIn_V !== null && (
+          <>
+            <dt>built-in voltage</dt>
+            <dd>
+              <Copyable
+                name="Built-in voltage in V"
+                value={builtIn_V}
+                shown={digits(builtIn_V, 3)}
+                unit="V"
+              />
+            </dd>
+          </>
+        )}
+      </dl>
+    </li>
   );
 }
 

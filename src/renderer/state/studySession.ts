@@ -63,8 +63,10 @@ export function emptyStudy(): Study {
     steps: [],
     models: {
       mobility: 'klaassen',
-      carriers: 'neutral',
-      ionisation: 'complete',
+      carriers: 'poisson',
+      ionisation: 'levels',
+      statistics: 'boltzmann',
+      narrowing: 'none',
       activation: 'full',
       ranges: 'universal',
       diffusivity: 'fair1981',

@@ -114,10 +114,10 @@ function carrierCurves(columns: SolvedColumns, palette: Palette): Curve[] {
 }
 
 function mobilityCurves(columns: SolvedColumns, palette: Palette): Curve[] {
-  const { net_cm3: net } = columns;
+  const { electrons_cm3: n, holes_cm3: p } = columns;
   const base = { track: 'mobility' as const, unit: 'cm²/Vs' };
   const ofMajority = (type: 'n' | 'p', mobility: Float64Array): Float64Array =>
-    mobility.map((value, i) => (net[i] >= 0 === (type === 'n') ? value : Number.NaN));
+    mobility.map((value, i) => (n[i] >= p[i] === (type === 'n') ? value : Number.NaN));
   const curves: Curve[] = [
     {
       ...base,

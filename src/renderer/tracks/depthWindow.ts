@@ -18,7 +18,10 @@ const UNDISTURBED_UM = 1;
  */
 export function defaultWindow(result: ResultDocument, columns: SolvedColumns): DepthWindow {
   const end = columns.depth_um[columns.depth_um.length - 1];
-  const junction = Math.max(0, ...result.junctions.map((each) => each.metallurgical_um));
+  const junction = Math.max(
+    0,
+    ...result.junctions.map((each) => each.electrical_um ?? each.metallurgical_um ?? 0),
+  );
   const wanted = Math.max(BELOW_JUNCTION * junction, 1.15 * backgroundDepth(columns));
   return { from_um: 0, to_um: Math.min(end, wanted > 0 ? roundUp(wanted) : UNDISTURBED_UM) };
 }

@@ -52,10 +52,21 @@ export function bandTraces(
   });
 }
 
-function junctionsIn(solution: Solution, window: DepthWindow): number[] {
+interface Mark {
+  readonly um: number;
+  readonly kind: 'electrical' | 'metallurgical';
+}
+
+/** Where n = p, and where the net doping changes sign when that is elsewhere. */
+function junctionsIn(solution: Solution, window: DepthWindow): Mark[] {
   return solution.result.junctions
-    .map((junction) => junction.metallurgical_um)
-    .filter((depth) => depth >= window.from_um && depth <= window.to_um);
+    .flatMap(({ electrical_um, metallurgical_um }): Mark[] => [
+      ...(electrical_um === null ? [] : [{ um: electrical_um, kind: 'electrical' as const }]),
+      ...(metallurgical_um === null || metallurgical_um === electrical_um
+        ? []
+        : [{ um: metallurgical_um, kind: 'metallurgical' as const }]),
+    ])
+    .filter(({ um }) => um >= window.from_um && um <= window.to_um);
 }
 
 export function junctionLines(
@@ -65,7 +76,7 @@ export function junctionLines(
   palette: Palette,
   frame: Frame,
 ): object[] {
-  return junctionsIn(solution, window).map((um) => ({
+  return junctionsIn(solution, window).map(({ um, kind }) => ({
     type: 'line',
     xref: 'x',
     yref: 'paper',
@@ -73,7 +84,7 @@ export function junctionLines(
     x1: um * PER_UM[view.depthUnit],
     y0: 0,
     y1: frame.domains.band[0],
-    line: { color: palette.junction, width: 1, dash: '3px,3px' },
+    line: { color: palette.junction, width: 1, dash: kind === 'electrical' ? '5px,3px' : '1px,4px' },
   }));
 }
 
@@ -90,24 +101,30 @@ export function junctionLabels(
   const labelWidth = (LABEL_EMS * view.fontSize * width) / (size.width - frame.margin.l - frame.margin.r);
   const unit = DEPTH_UNIT_NAMES[view.depthUnit];
   let last = Number.NEGATIVE_INFINITY;
-  return junctionsIn(solution, window).flatMap((um) => {
-    if (um - last < labelWidth) return [];
-    last = um;
-    const atEnd = um > window.to_um - labelWidth / 2;
-    const atStart = um < window.from_um + labelWidth / 2;
-    return [
-      {
-        xref: 'x',
-        yref: 'paper',
-        x: um * PER_UM[view.depthUnit],
-        y: (frame.domains.band[0] + frame.domains.doping[1]) / 2,
-        yanchor: 'middle',
-        xanchor: atEnd ? 'right' : atStart ? 'left' : 'center',
-        text: `${(um * PER_UM[view.depthUnit]).toPrecision(4)} ${unit}`,
-        showarrow: false,
-        bgcolor: palette.ground,
-        font: { color: palette.ink, size: view.fontSize },
-      },
-    ];
-  });
+  return junctionsIn(solution, window)
+    .filter(isLeading)
+    .flatMap(({ um }) => {
+      if (um - last < labelWidth) return [];
+      last = um;
+      const atEnd = um > window.to_um - labelWidth / 2;
+      const atStart = um < window.from_um + labelWidth / 2;
+      return [
+        {
+          xref: 'x',
+          yref: 'paper',
+          x: um * PER_UM[view.depthUnit],
+          y: (frame.domains.band[0] + frame.domains.doping[1]) / 2,
+          yanchor: 'middle',
+          xanchor: atEnd ? 'right' : atStart ? 'left' : 'center',
+          text: `${(um * PER_UM[view.depthUnit]).toPrecision(4)} ${unit}`,
+          showarrow: false,
+          bgcolor: palette.ground,
+          font: { color: palette.ink, size: view.fontSize },
+        },
+      ];
+    });
 }
+
+/** The depth that is labelled: the electrical junction, or the metallurgical one where there is no other. */
+const isLeading = ({ kind }: Mark, _i: number, all: readonly Mark[]): boolean =>
+  kind === 'electrical' || all.every((other) => other.kind === 'metallurgical');

@@ -1,0 +1,192 @@
+/**
+ * The charge with which silicon answers a potential, node by node: carriers by Boltzmann or Fermi-Dirac statistics and ionised
+ * dopants. Potentials are in units of kT/q, measured from where n = p in undoped silicon without bias.
+ *
+ *   Boltzmann: n = ni exp(u - fn), p = ni exp(fp - u), fn and fp the quasi-Fermi potentials of electrons and holes
+ *   Fermi-Dirac: n = Nc F_1/2(u - fn - ln(Nc/ni)), p = Nv F_1/2(fp - u - ln(Nv/ni))
+ */
+
+import { DOPANT_FACTS, type Dopant } from '../material/dopants';
+import { intrinsicDensity } from '../material/intrinsic';
+import { densitiesOfStates } from '../material/silicon';
+import { type FermiValue, fermiHalf } from '../numeric/fermiDirac';
+import type { NarrowingName } from '../study/names';
+import { boundColumns } from './ionisation';
+import { narrowingFactor } from './narrowing';
+
+export interface Statistics {
+  /** K */
+  readonly temperature: number;
+  readonly ionisation: 'complete' | 'levels';
+  readonly statistics: 'boltzmann' | 'fermi-dirac';
+  readonly narrowing: NarrowingName;
+}
+
+/** Active dopants on the nodes, cm^-3. */
+export interface ActiveColumns {
+  readonly dopants: readonly { readonly dopant: Dopant; readonly active: Float64Array }[];
+  readonly donors: Float64Array;
+  readonly acceptors: Float64Array;
+}
+
+/** Steps below this (kT/q) may be nothing but rounding. */
+const ROUNDING = 1e-4;
+
+interface LevelColumn {
+  readonly dopant: Dopant;
+  readonly isDonor: boolean;
+  readonly bound: Float64Array;
+  readonly threshold: Float64Array;
+}
+
+export class ChargeModel {
+  /** What `evaluate` fills: carriers, charge (p - n + ionised donors - ionised acceptors) and -d charge/du, all cm^-3. */
+  readonly electrons: Float64Array;
+  readonly holes: Float64Array;
+  readonly charge: Float64Array;
+  readonly response: Float64Array;
+  /** The part of `response` that electrons and the donors they neutralise have; the rest is that of holes and acceptors. */
+  readonly electronResponse: Float64Array;
+  /** Intrinsic density at each node, narrowing included. */
+  readonly intrinsic: Float64Array;
+  /** Quasi-Fermi potentials at each node, kT/q; zero in equilibrium. */
+  readonly electronLevel: Float64Array;
+  readonly holeLevel: Float64Array;
+  readonly #doping: ActiveColumns;
+  readonly #levels: readonly LevelColumn[];
+  readonly #states: { readonly conduction: number; readonly valence: number } | null;
+  #hasBias = false;
+
+  constructor(doping: ActiveColumns, { temperature, ionisation, statistics, narrowing }: Statistics) {
+    const count = doping.donors.length;
+    const column = () => new Float64Array(count);
+    this.electrons = column();
+    this.holes = column();
+    this.charge = column();
+    this.response = column();
+    this.electronResponse = column();
+    this.intrinsic = column().fill(intrinsicDensity(temperature));
+    this.electronLevel = column();
+    this.holeLevel = column();
+    this.#doping = doping;
+    if (narrowing !== 'none')
+      for (let i = 0; i < count; i++)
+        this.intrinsic[i] *= narrowingFactor(narrowing, doping.donors[i] + doping.acceptors[i], temperature);
+    this.#states = statistics === 'fermi-dirac' ? densitiesOfStates(temperature) : null;
+    this.#levels =
+      ionisation === 'complete'
+        ? []
+        : doping.dopants.flatMap(({ dopant, active }) => {
+            const columns = boundColumns(dopant, active, temperature);
+            return columns ? [{ dopant, isDonor: DOPANT_FACTS[dopant].role === 'donor', ...columns }] : [];
+          });
+  }
+
+  /** To be told after the quasi-Fermi potentials were changed. */
+  noteBias(): void {
+    this.#hasBias =
+      this.electronLevel.some((level) => level !== 0) || this.holeLevel.some((level) => level !== 0);
+  }
+
+  evaluate(u: Float64Array): void {
+    if (this.#states) this.#countDegenerate(u, this.#states.conduction, this.#states.valence);
+    else this.#count(u);
+    this.#addBound();
+  }
+
+  #count(u: Float64Array): void {
+    const { electrons, holes, charge, response, electronResponse, intrinsic } = this;
+    const { electronLevel, holeLevel } = this;
+    const { donors, acceptors } = this.#doping;
+    for (let i = 0; i < charge.length; i++) {
+      const up = Math.exp(u[i] - electronLevel[i]);
+      const n = intrinsic[i] * up;
+      const p = this.#hasBias ? intrinsic[i] * Math.exp(holeLevel[i] - u[i]) : intrinsic[i] / up;
+      electrons[i] = n;
+      holes[i] = p;
+      charge[i] = p - n + donors[i] - acceptors[i];
+      response[i] = n + p;
+      electronResponse[i] = n;
+    }
+  }
+
+  #countDegenerate(u: Float64Array, conduction: number, valence: number): void {
+    const { electrons, holes, charge, response, electronResponse, intrinsic } = this;
+    const { electronLevel, holeLevel } = this;
+    const { donors, acceptors } = this.#doping;
+    const out: FermiValue = { value: 0, slope: 0 };
+    for (let i = 0; i < charge.length; i++) {
+      fermiHalf(u[i] - electronLevel[i] - Math.log(conduction / intrinsic[i]), out);
+      const n = conduction * out.value;
+      const slope = conduction * out.slope;
+      fermiHalf(holeLevel[i] - u[i] - Math.log(valence / intrinsic[i]), out);
+      const p = valence * out.value;
+      electrons[i] = n;
+      holes[i] = p;
+      charge[i] = p - n + donors[i] - acceptors[i];
+      response[i] = slope + valence * out.slope;
+      electronResponse[i] = slope;
+    }
+  }
+
+  /** Takes back the charge of those dopants that hold their carrier. */
+  #addBound(): void {
+    const { charge, response, electronResponse } = this;
+    for (const { isDonor, bound, threshold } of this.#levels) {
+      const carriers = isDonor ? this.electrons : this.holes;
+      const sign = isDonor ? -1 : 1;
+      for (let i = 0; i < charge.length; i++) {
+        const all = carriers[i] + threshold[i];
+        const held = (bound[i] * carriers[i]) / all;
+        charge[i] += sign * held;
+        const change = (held * threshold[i]) / all;
+        response[i] += change;
+        if (isDonor) electronResponse[i] += change;
+      }
+    }
+  }
+
+  /** Ionised concentration of every dopant at the last evaluated potential, in the order of the doping. */
+  ionised(): Float64Array[] {
+    return this.#doping.dopants.map(({ dopant, active }) => {
+      const level = this.#levels.find((each) => each.dopant === dopant);
+      if (!level) return active;
+      const carriers = level.isDonor ? this.electrons : this.holes;
+      return active.map(
+        (all, i) => all - (level.bound[i] * carriers[i]) / (carriers[i] + level.threshold[i]),
+      );
+    });
+  }
+
+  /**
+   * Fills `u` with the potential at which every node is neutral by itself, and evaluates there. Ends when no step is longer than
+   * `tolerance` (kT/q) or rounding keeps steps from getting shorter, as where donors and acceptors almost cancel.
+   */
+  neutralPotential(u: Float64Array, tolerance: number): void {
+    const { donors, acceptors } = this.#doping;
+    for (let i = 0; i < u.length; i++) {
+      const net = donors[i] - acceptors[i];
+      u[i] =
+        (net >= 0 ? this.electronLevel[i] : this.holeLevel[i]) + Math.asinh(net / (2 * this.intrinsic[i]));
+    }
+    let before = Number.POSITIVE_INFINITY;
+    for (;;) {
+      this.evaluate(u);
+      let largest = 0;
+      for (let i = 0; i < u.length; i++) {
+        const step = this.charge[i] / this.response[i];
+        u[i] += damped(step);
+        largest = Math.max(largest, Math.abs(step));
+      }
+      const isStalled = largest < ROUNDING && largest > before / 2;
+      if (largest < tolerance || isStalled) break;
+      before = largest;
+    }
+    this.evaluate(u);
+  }
+}
+
+/** A Newton step held back where it is long; second order for short ones, so that convergence stays quadratic. */
+export function damped(step: number): number {
+  return Math.sign(step) * Math.log1p(Math.abs(step));
+}

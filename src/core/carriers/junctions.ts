@@ -1,0 +1,153 @@
+/** Junctions as the carriers see them: where n = p, how far the depletion reaches, and which sign change of doping they belong to. */
+
+import { ELEMENTARY_CHARGE } from '../material/constants';
+import { intervalOf } from '../numeric/interval';
+import type { SampledDoping } from '../profile/doping';
+import type { ChargeModel } from './charge';
+import type { PoissonSystem } from './poisson';
+import type { ElectricalJunction } from './state';
+
+interface Found {
+  readonly doping: SampledDoping;
+  readonly depth: Float64Array;
+  readonly electrons: Float64Array;
+  readonly holes: Float64Array;
+  readonly intrinsic: Float64Array;
+}
+
+/** With what is needed to ask how it answers a small change. */
+interface Solved extends Found {
+  readonly system: PoissonSystem;
+  readonly charges: ChargeModel;
+}
+
+/** Two cell ends may come as close as this, cm. */
+const CLOSEST = 1e-11;
+
+/** Depths where n = p, cm: ln(n/p) is smooth through a junction, so that the parabola of its cell gives the root. */
+export function crossings({ depth, electrons, holes }: Found): number[] {
+  const found: number[] = [];
+  const ratio = (i: number) => Math.log(electrons[i] / holes[i]);
+  for (let i = 0; i + 2 < depth.length; i += 2) {
+    const [a, b, c] = [ratio(i), ratio(i + 1), ratio(i + 2)];
+    if (a === 0 && i > 0) found.push(depth[i]);
+    for (const [low, high, from] of [
+      [a, b, 0],
+      [b, c, 0.5],
+    ])
+      if (low * high < 0 || (high === 0 && from === 0)) {
+        const t = rootOfParabola(a, b, c, from, from + 0.5);
+        found.push(nearestEnd(depth[i] + t * (depth[i + 2] - depth[i]), depth[i], depth[i + 2]));
+      }
+  }
+  return found.filter((x) => x > 0 && x < depth[depth.length - 1]);
+}
+
+/** Root between `from` and `to` of the parabola through (0, a), (1/2, b), (1, c), by bisection: it changes sign there. */
+function rootOfParabola(a: number, b: number, c: number, from: number, to: number): number {
+  const at = (t: number) => a + t * (4 * b - 3 * a - c + t * 2 * (a + c - 2 * b));
+  let [low, high] = [from, to];
+  const isRising = at(high) > at(low);
+  for (let round = 0; round < 50; round++) {
+    const middle = (low + high) / 2;
+    if (at(middle) > 0 === isRising) high = middle;
+    else low = middle;
+  }
+  return (low + high) / 2;
+}
+
+const nearestEnd = (x: number, from: number, to: number): number =>
+  x - from < CLOSEST ? from : to - x < CLOSEST ? to : x;
+
+/** What is to be said of the junctions at `cuts` (positions); `volt` is kT/q. Uses the system's workspace. */
+export function electricalJunctions(
+  found: Solved,
+  cuts: readonly number[],
+  volt: number,
+): ElectricalJunction[] {
+  const { depth, doping, electrons, holes } = found;
+  const bounds = [0, ...cuts, depth.length - 1];
+  const free = new Set(doping.junctions.map((_, k) => k));
+  return cuts.map((cut, k) => {
+    const isN = [electrons[bounds[k] + 1] > holes[bounds[k] + 1], electrons[cut + 1] > holes[cut + 1]];
+    const { edges, capacitance } = smallSignal(found, cut, bounds[k], bounds[k + 2], isN[0], volt);
+    const metallurgical = match(doping, depth[cut], isN[1], free);
+    if (metallurgical !== null) free.delete(metallurgical);
+    const [upper, lower] = edges.map((x) => bandBending(found, x));
+    return {
+      depth: depth[cut],
+      metallurgical,
+      depletion: edges,
+      capacitance,
+      builtIn: Math.abs(upper - lower) * volt,
+    };
+  });
+}
+
+/** Potential of neutral silicon with the doping at a depth against undoped silicon, kT/q. */
+function bandBending({ depth, doping, intrinsic }: Found, x: number): number {
+  const i = Math.max(0, intervalOf(depth, x));
+  return Math.asinh(doping.net[i] / (2 * intrinsic[i]));
+}
+
+/**
+ * The charge that follows a small change of the voltage across a junction: everything above it has its Fermi level raised by one
+ * kT/q in a linearised Poisson equation; its minority
+ * carriers keep the level of the layer below, which gives them, and down there the other way about.
+ */
+function smallSignal(
+  { depth, system, charges }: Solved,
+  cut: number,
+  top: number,
+  bottom: number,
+  isN: boolean,
+  volt: number,
+): { edges: [number, number]; capacitance: number } {
+  const { response, electronResponse } = charges;
+  const raised = (i: number): number => {
+    const ofElectrons = electronResponse[i];
+    const ofMajority = isN ? ofElectrons : response[i] - ofElectrons;
+    if (i < top) return response[i];
+    return depth[i] < (depth[cut] + depth[bottom]) / 2 ? ofMajority : 0;
+  };
+  const { step } = system;
+  step.fill(0);
+  for (let i = 0; i + 2 < depth.length; i += 2) {
+    const sixth = (depth[i + 2] - depth[i]) / 6;
+    step[i] += sixth * raised(i);
+    step[i + 1] = 4 * sixth * raised(i + 1);
+    step[i + 2] = sixth * raised(i + 2);
+  }
+  system.solve(response);
+  const change = (i: number): number => raised(i) - response[i] * step[i];
+  const side = (from: number, to: number): { charge: number; centre: number } => {
+    let charge = 0;
+    let moment = 0;
+    for (let i = from; i < to; i += 2) {
+      const sixth = (depth[i + 2] - depth[i]) / 6;
+      const [a, b, c] = [sixth * change(i), 4 * sixth * change(i + 1), sixth * change(i + 2)];
+      charge += a + b + c;
+      moment += a * depth[i] + b * depth[i + 1] + c * depth[i + 2];
+    }
+    return { charge, centre: moment / charge };
+  };
+  const upper = side(0, cut);
+  const lower = side(cut, depth.length - 1);
+  return {
+    edges: [upper.centre, lower.centre],
+    capacitance: (ELEMENTARY_CHARGE * Math.abs(upper.charge)) / volt,
+  };
+}
+
+/** The nearest sign change of net doping in the same sense that no other junction has taken. */
+function match(doping: SampledDoping, depth: number, toN: boolean, free: ReadonlySet<number>): number | null {
+  let best: number | null = null;
+  let distance = Number.POSITIVE_INFINITY;
+  for (const k of free) {
+    const i = doping.junctions[k];
+    if (doping.net[i + 1] > 0 !== toN) continue;
+    const away = Math.abs(doping.depth[i] - depth);
+    if (away < distance) [best, distance] = [k, away];
+  }
+  return best;
+}
