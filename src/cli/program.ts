@@ -2,18 +2,21 @@
 
 import { Command } from 'commander';
 import { PROGRAM_VERSION } from '../core/index';
+import { biasCommand } from './commands/bias';
 import { checkCommand } from './commands/check';
 import { importCommand } from './commands/importTable';
 import { rangeCommand } from './commands/range';
 import { resistivityCommand } from './commands/resistivity';
 import { schemaCommand } from './commands/schema';
 import { solveCommand } from './commands/solve';
+import { temperatureCommand } from './commands/temperature';
 
 const AFTER_HELP = `
 Examples:
   $ ohmstrata solve demo-profiles/p-resistor.json
   $ ohmstrata resistivity --dopant boron --concentration 1e16
   $ ohmstrata range --ion B --energy 60
+  $ ohmstrata temperature demo-profiles/p-resistor.json --from -55 --to 125
   $ ohmstrata help solve
 
 Answers go to standard output, everything else to standard error.
@@ -35,6 +38,8 @@ export function program(): Command {
     solveCommand(),
     resistivityCommand(),
     rangeCommand(),
+    temperatureCommand(),
+    biasCommand(),
     importCommand(),
     checkCommand(),
     schemaCommand(),

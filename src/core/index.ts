@@ -1,5 +1,7 @@
 /** The public face of the calculation: all that the window and the command line may import. */
 
+export { type BiasResult, type BiasSpan, biasSweep } from './explore/bias';
+export { type TemperatureResult, type TemperatureSpan, temperatureSweep } from './explore/temperature';
 export { DOPANT_FACTS, DOPANTS, type Dopant, IMPLANT_SPECIES, type ImplantSpecies } from './material/dopants';
 export { concentrationOf, resistivityOf } from './material/mf723';
 export { MOBILITY_MODELS } from './mobility/list';

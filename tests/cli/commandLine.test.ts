@@ -11,7 +11,14 @@ import {
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, test } from 'vitest';
-import { columnsTable, parseStudy, rangeStatistics, solve, studyJsonSchema } from '../../src/core/index';
+import {
+  biasSweep,
+  columnsTable,
+  parseStudy,
+  rangeStatistics,
+  solve,
+  studyJsonSchema,
+} from '../../src/core/index';
 import { builtCommandLine, type CommandLine } from './call';
 
 const RESISTOR = 'demo-profiles/p-resistor.json';
@@ -277,6 +284,41 @@ describe('range', () => {
   });
 });
 
+describe('temperature and bias', () => {
+  test('temperature prints the coefficients and the table, and writes it', () => {
+    const out = join(folder, 'temperature.csv');
+    const { stdout, status } = call(['temperature', RESISTOR, '--points', '5', '--out', out]);
+    expect(status).toBe(0);
+    expect(stdout).toMatch(/^layer +reference_ohmSq +TC1_ppmK +TC2_ppmK2 +worst_percent$/m);
+    const rows = readFileSync(out, 'utf8').trimEnd().split('\n').slice(-6);
+    expect(rows[0]).toBe('temperature_C,layer1p_ohmSq,layer2n_ohmSq');
+    expect(rows.slice(1).map((row) => Number(row.split(',')[0]))).toEqual([-55, -10, 35, 80, 125]);
+  });
+
+  test('temperature of a model without it ends with exit code 3', () => {
+    const ended = call(['temperature', 'demo-profiles/n-plus.json']);
+    expect([ended.status, ended.stdout]).toEqual([3, '']);
+    expect(ended.stderr).toMatch(/knows one temperature only/);
+  });
+
+  test('bias gives the document of the core', () => {
+    const { stdout } = call(['bias', RESISTOR, '--layer', '1', '--to', '5', '--points', '3', '--json']);
+    const expected = biasSweep(parseStudy(readFileSync(RESISTOR, 'utf8')), {
+      layer: 1,
+      junctions: 'both',
+      from_V: 0,
+      to_V: 5,
+      points: 3,
+    });
+    expect(JSON.parse(stdout)).toEqual(JSON.parse(JSON.stringify(expected)));
+  });
+
+  test('bias of a layer without junctions ends with exit code 3', () => {
+    const ended = call(['bias', 'demo-profiles/film-on-insulator.json', '--layer', '1']);
+    expect([ended.status, ended.stdout]).toEqual([3, '']);
+  });
+});
+
 describe('import', () => {
   const wafer = ['--wafer', 'P', '--concentration', '1.3e15'];
 
@@ -336,14 +378,21 @@ describe('check, schema, help', () => {
     expect(JSON.parse(call(['schema']).stdout)).toEqual(JSON.parse(JSON.stringify(studyJsonSchema())));
   });
 
-  test.each([[], ['solve'], ['resistivity'], ['range'], ['import'], ['check'], ['schema']])(
-    'help of "%s" has examples',
-    (...command) => {
-      const { stdout, status } = call([...command, '--help']);
-      expect(status).toBe(0);
-      expect(stdout).toMatch(/Examples?:\n {2}\$ ohmstrata /);
-    },
-  );
+  test.each([
+    [],
+    ['solve'],
+    ['resistivity'],
+    ['range'],
+    ['temperature'],
+    ['bias'],
+    ['import'],
+    ['check'],
+    ['schema'],
+  ])('help of "%s" has examples', (...command) => {
+    const { stdout, status } = call([...command, '--help']);
+    expect(status).toBe(0);
+    expect(stdout).toMatch(/Examples?:\n {2}\$ ohmstrata /);
+  });
 
   test('a mistyped command or option is answered with the nearest one', () => {
     expect(call(['slove', RESISTOR])).toMatchObject({ status: 2, stdout: '' });

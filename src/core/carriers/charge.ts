@@ -146,6 +146,19 @@ export class ChargeModel {
     }
   }
 
+  /**
+   * A Newton step of node i at the last evaluated potential, held back where it would make carriers grow out of all proportion:
+   * free until those it raises reach the density of everything charged there, logarithmic beyond. Short steps are left alone to
+   * second order, so that convergence stays quadratic.
+   */
+  heldBack(step: number, i: number): number {
+    const length = Math.abs(step);
+    const raised = step > 0 ? this.electrons[i] : this.holes[i];
+    const all = this.electrons[i] + this.holes[i] + this.#doping.donors[i] + this.#doping.acceptors[i];
+    const free = Math.log(all / raised);
+    return length <= free ? step : Math.sign(step) * (free + Math.log1p(length - free));
+  }
+
   /** Ionised concentration of every dopant at the last evaluated potential, in the order of the doping. */
   ionised(): Float64Array[] {
     return this.#doping.dopants.map(({ dopant, active }) => {
@@ -175,7 +188,7 @@ export class ChargeModel {
       let largest = 0;
       for (let i = 0; i < u.length; i++) {
         const step = this.charge[i] / this.response[i];
-        u[i] += damped(step);
+        u[i] += this.heldBack(step, i);
         largest = Math.max(largest, Math.abs(step));
       }
       const isStalled = largest < ROUNDING && largest > before / 2;
@@ -184,9 +197,4 @@ export class ChargeModel {
     }
     this.evaluate(u);
   }
-}
-
-/** A Newton step held back where it is long; second order for short ones, so that convergence stays quadratic. */
-export function damped(step: number): number {
-  return Math.sign(step) * Math.log1p(Math.abs(step));
 }

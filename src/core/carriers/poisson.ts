@@ -10,7 +10,7 @@
 import { ELEMENTARY_CHARGE } from '../material/constants';
 import { PERMITTIVITY, thermalVoltage } from '../material/silicon';
 import { solveTridiagonal } from '../numeric/tridiagonal';
-import { type ChargeModel, damped } from './charge';
+import type { ChargeModel } from './charge';
 
 /** What the surface imposes: a sheet of charge outside (cm^-2 of q, zero for zero field) or the potential there (kT/q). */
 export type SurfaceCondition = { readonly charge: number } | { readonly potential: number };
@@ -119,7 +119,7 @@ export function solvePoisson(
     for (let i = 0; i < u.length; i++) {
       const length = Math.abs(step[i]);
       if (length > largest) largest = length;
-      u[i] += length < SHORTEST_STEP ? step[i] : damped(step[i]);
+      u[i] += charge.heldBack(step[i], i);
     }
     if (largest < SHORTEST_STEP) {
       charge.evaluate(u);
