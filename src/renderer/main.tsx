@@ -12,11 +12,13 @@ import { openDemo, openGiven } from './state/files';
 import { keepWork, lookForLeftBehind } from './state/recovery';
 import { followStudy } from './state/solver';
 import { redoName, study, undoName, unsaved } from './state/studySession';
+import { followSweeps } from './state/sweeps';
 import { followTheme } from './state/viewState';
 
 followTheme();
 await openDemo(DEMOS[0].text);
 followStudy();
+followSweeps();
 render(<App />, document.getElementById('app') as HTMLElement);
 
 document.addEventListener('keydown', runKeys);

@@ -1,14 +1,30 @@
 /** The worker: runs the core away from the window, so that typing and pointing never wait for it. */
 
 import * as Comlink from 'comlink';
-import { InputProblem, type Solution, type Study, solve } from '../core/index';
+import {
+  type BiasResult,
+  type BiasSpan,
+  biasSweep,
+  InputProblem,
+  type Solution,
+  type Study,
+  solve,
+  type TemperatureResult,
+  type TemperatureSpan,
+  temperatureSweep,
+} from '../core/index';
+
+interface Failed {
+  ok: false;
+  key: string;
+  message: string;
+}
 
 /** What a run ends with; problems cross as data. */
-export type Solved =
-  | { ok: true; solution: Solution; milliseconds: number }
-  | { ok: false; key: string; message: string };
+export type Solved = { ok: true; solution: Solution; milliseconds: number } | Failed;
+export type Swept<Result> = { ok: true; result: Result } | Failed;
 
-function asProblem(error: unknown): { ok: false; key: string; message: string } {
+function asProblem(error: unknown): Failed {
   if (error instanceof InputProblem) return { ok: false, key: error.place.key ?? '', message: error.message };
   return { ok: false, key: '', message: error instanceof Error ? error.message : String(error) };
 }
@@ -30,7 +46,20 @@ const calculations = {
       return asProblem(error);
     }
   },
+
+  temperature: (study: Study, span: TemperatureSpan): Swept<TemperatureResult> =>
+    swept(() => temperatureSweep(study, span)),
+
+  bias: (study: Study, span: BiasSpan): Swept<BiasResult> => swept(() => biasSweep(study, span)),
 };
+
+function swept<Result>(run: () => Result): Swept<Result> {
+  try {
+    return { ok: true, result: run() };
+  } catch (error) {
+    return asProblem(error);
+  }
+}
 
 export type Calculations = typeof calculations;
 

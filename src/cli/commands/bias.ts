@@ -16,7 +16,7 @@ interface Options {
   out?: string;
 }
 
-const volts = quantity('plain', 'V', 0, 1000);
+const volts = quantity('voltage', 'V', 0, 1000);
 
 export function biasCommand(): Command {
   return new Command('bias')

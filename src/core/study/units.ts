@@ -9,6 +9,7 @@ export type QuantityKind =
   | 'time'
   | 'resistivity'
   | 'sheetResistance'
+  | 'voltage'
   | 'plain';
 
 export interface Unit {
@@ -62,6 +63,9 @@ export const UNITS: readonly Unit[] = [
   unit('resistivity', 'mohm cm', 'mohms?[ *-]{0,3}cm', 1, 1e3),
   unit('resistivity', 'ohm m', 'ohms?[ *-]{0,3}m', 100),
   unit('sheetResistance', 'ohm/sq', 'ohms?(?: ?(?:/|per) ?sq(?:\\.|uare)?)?'),
+  unit('voltage', 'V', 'v|volts?'),
+  unit('voltage', 'mV', 'mv|millivolts?', 1, 1e3),
+  unit('voltage', 'kV', 'kv|kilovolts?', 1e3),
   unit('sheetResistance', 'kohm/sq', 'kohms?(?: ?(?:/|per) ?sq(?:\\.|uare)?)?', 1e3),
 ];
 

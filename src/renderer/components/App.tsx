@@ -2,8 +2,9 @@
 
 import { ImportSheet } from '../import/ImportSheet';
 import { importing, takeDropped } from '../state/files';
-import { panel } from '../state/viewState';
+import { panel, VIEW_NAMES, view } from '../state/viewState';
 import { About } from './About';
+import { BiasView } from './BiasView';
 import { CommandSearch } from './CommandSearch';
 import { PictureDialog } from './PictureDialog';
 import { OpenQuestion } from './QuestionDialog';
@@ -11,6 +12,7 @@ import { Readings } from './Readings';
 import { Recipe } from './Recipe';
 import { RecoveryBar } from './RecoveryBar';
 import { StatusBar } from './StatusBar';
+import { TemperatureView } from './TemperatureView';
 import { TopBar } from './TopBar';
 import { Tracks } from './Tracks';
 import { TrackTable } from './TrackTable';
@@ -23,8 +25,10 @@ export function App() {
       <TopBar />
       <RecoveryBar />
       <Recipe />
-      <main class="middle" aria-label="Tracks">
-        <Tracks />
+      <main class="middle" aria-label={VIEW_NAMES[view.value]}>
+        {view.value === 'tracks' && <Tracks />}
+        {view.value === 'temperature' && <TemperatureView />}
+        {view.value === 'bias' && <BiasView />}
         {importing.value && <ImportSheet key={importing.value} table={importing.value} />}
       </main>
       <Readings />

@@ -11,6 +11,7 @@ import { MeasurementsCard } from './MeasurementsCard';
 import { Menu, type MenuItem } from './Menu';
 import { ModelsCard } from './ModelsCard';
 import { StepCard } from './StepCard';
+import { SurroundingsCard } from './SurroundingsCard';
 import { WaferCard } from './WaferCard';
 
 export function Recipe() {
@@ -21,6 +22,7 @@ export function Recipe() {
       <Steps />
       <AddStep />
       <ModelsCard />
+      <SurroundingsCard />
       <MeasurementsCard />
     </nav>
   );

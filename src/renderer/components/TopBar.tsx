@@ -5,7 +5,7 @@ import { MENU_COMMANDS } from '../state/commands';
 import { DEMOS } from '../state/demos';
 import { openDemo } from '../state/files';
 import { place, redoName, undoName, unsaved } from '../state/studySession';
-import { chooseTheme, panel, themeChoice } from '../state/viewState';
+import { chooseTheme, panel, themeChoice, VIEW_NAMES, type View, view } from '../state/viewState';
 import { Icon } from './Icon';
 import { IconButton } from './IconButton';
 import { Menu, type MenuItem } from './Menu';
@@ -66,6 +66,7 @@ export function TopBar() {
           items={DEMOS.map((demo) => ({ name: demo.name, note: demo.note, run: () => openDemo(demo.text) }))}
         />
       </div>
+      <Views />
       <div class="bar-space" />
       <button
         type="button"
@@ -90,5 +91,25 @@ export function TopBar() {
         ]}
       />
     </header>
+  );
+}
+
+/** What the middle shows; the recipe and the readings stay beside it. */
+function Views() {
+  return (
+    <fieldset class="toggle views" aria-label="View">
+      {(Object.keys(VIEW_NAMES) as View[]).map((name) => (
+        <button
+          key={name}
+          type="button"
+          aria-pressed={view.value === name}
+          onClick={() => {
+            view.value = name;
+          }}
+        >
+          {VIEW_NAMES[name]}
+        </button>
+      ))}
+    </fieldset>
   );
 }

@@ -4,7 +4,7 @@
  */
 
 import type { PlotElement } from 'plotly.js-cartesian-dist-min';
-import { useEffect, useMemo, useRef, useState } from 'preact/hooks';
+import { useEffect, useMemo, useRef } from 'preact/hooks';
 import { outdated, type Shown, shown, solveProblem } from '../state/solver';
 import {
   chosenWindow,
@@ -18,12 +18,12 @@ import { type DepthWindow, zoomed } from '../tracks/depthWindow';
 import { buildFigure } from '../tracks/figure';
 import { frameOf, type Size } from '../tracks/frame';
 import { plotly } from '../tracks/plotly';
-import { PER_UM, type TrackView } from '../tracks/view';
+import { PER_UM, type TrackView, WINDOW_FONT } from '../tracks/view';
 import { DepthReading } from './DepthReading';
 import { TrackTools } from './TrackTools';
 import { onTrackKey } from './trackKeys';
+import { useSize } from './useSize';
 
-const FONT = "'Source Sans 3 Variable', system-ui, sans-serif";
 const FONT_SIZE = 12;
 const CONFIG = { displayModeBar: false, scrollZoom: true, doubleClick: false, responsive: false };
 
@@ -44,7 +44,7 @@ export function Tracks() {
       theme: theme.value,
       depthUnit: depthUnit.value,
       scale: concentrationScale.value,
-      font: FONT,
+      font: WINDOW_FONT,
       fontSize: FONT_SIZE,
     }),
     [theme.value, depthUnit.value, concentrationScale.value],
@@ -102,20 +102,6 @@ function Crosshair({ size, window }: { size: Size; window: DepthWindow }) {
       }}
     />
   );
-}
-
-/** The element's size in whole pixels, as it changes; null before it is known. */
-function useSize(element: { current: HTMLElement | null }): Size | null {
-  const [size, setSize] = useState<Size | null>(null);
-  useEffect(() => {
-    const observer = new ResizeObserver(([entry]) => {
-      const { width, height } = entry.contentRect;
-      setSize({ width: Math.floor(width), height: Math.floor(height) });
-    });
-    observer.observe(element.current as HTMLElement);
-    return () => observer.disconnect();
-  }, []);
-  return size && size.width > 0 && size.height > 0 ? size : null;
 }
 
 /** Draws the newest request after the frame in which the readings appeared; requests meanwhile replace it. */

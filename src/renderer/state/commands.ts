@@ -7,7 +7,17 @@ import { importTable, newStudy, openDemo, openGiven, openStudy, save } from './f
 import { add } from './stepActions';
 import { STEP_KINDS, STEP_ORDER } from './stepKinds';
 import { redoEdit, redoName, undoEdit, undoName } from './studySession';
-import { chooseTheme, chosenWindow, concentrationScale, depthUnit, panel, pictureFormat } from './viewState';
+import {
+  chooseTheme,
+  chosenWindow,
+  concentrationScale,
+  depthUnit,
+  panel,
+  pictureFormat,
+  VIEW_NAMES,
+  type View,
+  view,
+} from './viewState';
 
 export interface Command {
   readonly id: string;
@@ -65,6 +75,13 @@ export const MENU_COMMANDS: Record<MenuCommand, Command> = {
 };
 
 const VIEW_COMMANDS: readonly Command[] = [
+  ...(Object.keys(VIEW_NAMES) as View[]).map((name) => ({
+    id: `view-${name}`,
+    name: `View: ${VIEW_NAMES[name].toLowerCase()}`,
+    run: () => {
+      view.value = name;
+    },
+  })),
   {
     id: 'table',
     name: 'Show the tracks as a table',

@@ -12,6 +12,7 @@ const SHOWN = {
   min: 'min',
   'ohm cm': 'Ω cm',
   'ohm/sq': 'Ω/sq',
+  V: 'V',
   fraction: 'of 1',
 } as const;
 
@@ -30,6 +31,7 @@ const KINDS: Record<DisplayUnit, Parameters<typeof parseQuantity>[1]['kind']> = 
   min: 'time',
   'ohm cm': 'resistivity',
   'ohm/sq': 'sheetResistance',
+  V: 'voltage',
   fraction: 'plain',
 };
 

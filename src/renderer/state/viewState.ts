@@ -8,6 +8,15 @@ import type { ConcentrationScale, DepthUnit } from '../tracks/view';
 import { bridge } from './bridge';
 import { shown } from './solver';
 
+/** What the middle of the window shows. */
+export type View = 'tracks' | 'temperature' | 'bias';
+export const VIEW_NAMES: Record<View, string> = {
+  tracks: 'Predict',
+  temperature: 'Temperature',
+  bias: 'Bias',
+};
+export const view = signal<View>('tracks');
+
 export type Panel = 'commands' | 'table' | 'about' | 'picture';
 
 export const themeChoice = signal<ThemeChoice>('system');

@@ -16,3 +16,6 @@ export interface TrackView {
 
 export const PER_UM: Record<DepthUnit, number> = { um: 1, nm: 1000 };
 export const DEPTH_UNIT_NAMES: Record<DepthUnit, string> = { um: 'µm', nm: 'nm' };
+
+/** The typeface of the window, for figures in it. */
+export const WINDOW_FONT = "'Source Sans 3 Variable', system-ui, sans-serif";

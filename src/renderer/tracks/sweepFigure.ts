@@ -1,0 +1,65 @@
+/** Lines against temperature or voltage as a figure for the plotting library. */
+
+import type { Size } from './frame';
+import { PALETTES, type Theme } from './palette';
+
+export interface Line {
+  readonly name: string;
+  readonly x: readonly number[];
+  /** Null breaks the line. */
+  readonly y: readonly (number | null)[];
+}
+
+export interface SweepFigure {
+  readonly lines: readonly Line[];
+  readonly xTitle: string;
+  readonly yTitle: string;
+}
+
+const DASHES = ['solid', '7px,3px', '2px,3px', '9px,3px,2px,3px', '12px,4px'];
+const FONT_SIZE = 12;
+
+export function buildSweepFigure(
+  { lines, xTitle, yTitle }: SweepFigure,
+  theme: Theme,
+  font: string,
+  size: Size,
+) {
+  const palette = PALETTES[theme];
+  const colours = [palette.holes, palette.electrons, palette.lattice, palette.impurity, palette.net];
+  const axis = {
+    gridcolor: palette.grid,
+    linecolor: palette.axis,
+    showline: true,
+    mirror: true,
+    zerolinecolor: palette.axis,
+    tickfont: { color: palette.faintInk },
+    ticks: 'outside',
+    ticklen: 4,
+    tickcolor: palette.axis,
+    fixedrange: true,
+  };
+  return {
+    data: lines.map(({ name, x, y }, k) => ({
+      type: 'scatter',
+      mode: 'lines',
+      name,
+      x,
+      y,
+      line: { color: colours[k % colours.length], dash: DASHES[k % DASHES.length], width: 2 },
+    })),
+    layout: {
+      ...size,
+      margin: { l: 66, r: 18, t: 14, b: 46, pad: 0 },
+      paper_bgcolor: palette.ground,
+      plot_bgcolor: palette.ground,
+      font: { family: font, size: FONT_SIZE, color: palette.ink },
+      showlegend: lines.length > 1,
+      legend: { x: 0.02, y: 0.98, bgcolor: `${palette.ground}cc` },
+      hovermode: 'x unified',
+      hoverlabel: { bgcolor: palette.ground, bordercolor: palette.axis, font: { color: palette.ink } },
+      xaxis: { ...axis, title: { text: xTitle, standoff: 6 } },
+      yaxis: { ...axis, title: { text: yTitle, standoff: 8 }, exponentformat: 'none' },
+    },
+  };
+}
