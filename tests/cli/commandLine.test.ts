@@ -74,7 +74,7 @@ describe('solve', () => {
     expect(stdout).toMatch(
       new RegExp(`^1 +${digits(junction.metallurgical_um)} +${digits(junction.electrical_um)} `, 'm'),
     );
-    expect(stdout).toMatch(new RegExp(`^four-point +1 +2650 +${digits(layer.sheetResistance_ohmSq)} `, 'm'));
+    expect(stdout).toMatch(new RegExp(`^four-point +1 +2390 +${digits(layer.sheetResistance_ohmSq)} `, 'm'));
     expect(stderr).toMatch(/^warning: step 1: .*amorphous/);
   });
 

@@ -30,7 +30,7 @@ describe('the first screen', () => {
     expect(await person.field('name').inputValue()).toBe('p-type resistor, lot LB-07');
     expect(await person.sheetResistance()).toBe(predicted());
     expect(await desktop.page.locator('.plot .main-svg').count()).toBeGreaterThan(0);
-    expect(await person.text('.measured-line')).toMatch(/2650/);
+    expect(await person.text('.measured-line')).toMatch(/2390/);
     expect(desktop.errors).toEqual([]);
     expect(desktop.requests.filter((url) => !/^(app|data|blob):/.test(url))).toEqual([]);
   });

@@ -8,6 +8,7 @@ import { study } from '../support/studies';
 const film = study({
   wafer: { dopant: 'boron', concentration_cm3: 3e17, thickness_um: 2 },
   temperature_C: 27,
+  models: { ionisation: 'levels' },
 });
 const span = { from_C: -55, to_C: 125, points: 10 };
 

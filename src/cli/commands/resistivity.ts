@@ -43,7 +43,7 @@ export function resistivityCommand(): Command {
         'which part of the dopant is ionised; models made from dopants take all',
       )
         .choices(IONISATION_NAMES)
-        .default('levels'),
+        .default('complete'),
     )
     .option('--json', 'print a JSON document')
     .addHelpText(

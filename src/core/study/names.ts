@@ -6,8 +6,8 @@ export type MobilityName = (typeof MOBILITY_NAMES)[number];
 /** `poisson`: electrostatic equilibrium through the whole stack; `neutral`: no charge anywhere. */
 export const CARRIER_NAMES = ['poisson', 'neutral'] as const;
 
-/** `levels`: dopant levels that move into the band as doping grows; `complete`: every active dopant is ionised. */
-export const IONISATION_NAMES = ['levels', 'complete'] as const;
+/** `complete`: every active dopant is ionised; `levels`: dopant levels that move into the band as doping grows. */
+export const IONISATION_NAMES = ['complete', 'levels'] as const;
 
 export const STATISTICS_NAMES = ['boltzmann', 'fermi-dirac'] as const;
 

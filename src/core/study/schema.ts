@@ -167,7 +167,7 @@ const fraction = between(0, 1);
 const models = z.strictObject({
   mobility: z.enum(MOBILITY_NAMES).default('klaassen'),
   carriers: z.enum(CARRIER_NAMES).default('poisson'),
-  ionisation: z.enum(IONISATION_NAMES).default('levels'),
+  ionisation: z.enum(IONISATION_NAMES).default('complete'),
   statistics: z.enum(STATISTICS_NAMES).default('boltzmann'),
   narrowing: z.enum(NARROWING_NAMES).default('none'),
   activation: z.union([z.enum(['full', 'solubility']), z.partialRecord(dopant, fraction)]).default('full'),

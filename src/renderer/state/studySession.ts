@@ -64,7 +64,7 @@ export function emptyStudy(): Study {
     models: {
       mobility: 'klaassen',
       carriers: 'poisson',
-      ionisation: 'levels',
+      ionisation: 'complete',
       statistics: 'boltzmann',
       narrowing: 'none',
       activation: 'full',
