@@ -4,14 +4,15 @@ import { spawnSync } from 'node:child_process';
 import { readFileSync } from 'node:fs';
 import { cpus } from 'node:os';
 import { resolve } from 'node:path';
+import { type CarrierChoice, carriersNear, carriersOf } from '../src/core/carriers/carriers';
+import type { CarrierState } from '../src/core/carriers/state';
+import type { SampledDoping } from '../src/core/profile/doping';
+import { resample } from '../src/core/profile/resample';
 import { conduction } from '../src/core/sheet/conduction';
 import { layerReadings, layerSpans } from '../src/core/sheet/layers';
+import { modelSpread } from '../src/core/sheet/modelSpread';
 import { temperatureCoefficients } from '../src/core/sheet/temperatureCoefficient';
-import { mobilityModel } from '../src/core/mobility/list';
-import { runRecipe } from '../src/core/process/runRecipe';
-import { sampleDoping } from '../src/core/profile/doping';
-import { solve } from '../src/core/solve';
-import { toRecipe } from '../src/core/study/toRecipe';
+import { prepare, solve } from '../src/core/solve';
 import { parseStudy, validateStudy } from '../src/core/study/validate';
 
 const RUNS = 300;
@@ -54,39 +55,79 @@ function command(arguments_: string[], runs = 15): Timing {
   return timed(() => spawnSync(process.execPath, arguments_, { stdio: 'ignore' }), runs);
 }
 
-function coreStages(): Timing {
-  const recipe = toRecipe(STUDY);
-  const model = mobilityModel(recipe.models.mobility);
-  const build = () => {
-    const process_ = runRecipe(recipe);
-    const activation = { fraction: process_.activeFractions, limit: process_.activeLimits };
-    return sampleDoping(process_.contributions, activation, recipe.wafer.thickness, 1);
-  };
-  const doping = build();
-  const spans = layerSpans(doping, doping.junctions);
-  const readings = () => {
-    const flow = conduction(doping, model, recipe.temperature);
-    return spans.map((span) => layerReadings(doping, flow, span));
-  };
-  console.log(`depth mesh: ${doping.depth.length} nodes, ${spans.length} layers`);
-  line('profile: recipe, mesh, sampling', timed(build));
-  const chain = timed(readings);
-  line('carriers, mobility, layers', chain);
-  line('temperature coefficients', timed(() => temperatureCoefficients(doping, model, recipe.temperature, spans)));
-  line('whole: validated study to result document', timed(() => solve(STUDY)));
-  return chain;
+/** What is timed against NumPy: from the doping to the readings, neutral and in equilibrium. */
+interface Chains {
+  neutral: Timing;
+  poisson: Timing;
+  nodes: number;
 }
 
-function numpyChain(ours: Timing, nodes: string): void {
+function coreStages(): Chains {
+  const prepared = prepare(STUDY);
+  const { doping, model } = prepared;
+  const neutral: CarrierChoice = { ...prepared.choice, carriers: 'neutral' };
+  const poisson: CarrierChoice = { ...prepared.choice, carriers: 'poisson' };
+  const chain = (state: CarrierState) => {
+    const flow = conduction(state, model);
+    return layerSpans(state).map((span) => layerReadings(state, flow, span));
+  };
+  const found = carriersOf(doping, poisson);
+  const dense = ofNodes(doping, 600);
+  const denseFound = carriersOf(dense, poisson);
+  console.log(
+    `meshes: ${doping.depth.length} nodes of the doping, ${found.doping.depth.length} of the equilibrium, ${denseFound.doping.depth.length} of a finer one`,
+  );
+  line('profile: recipe, mesh, sampling', timed(() => prepare(STUDY)));
+  const timings = {
+    neutral: timed(() => chain(carriersOf(doping, neutral))),
+    poisson: timed(() => chain(carriersOf(doping, poisson))),
+    nodes: doping.depth.length,
+  };
+  line('neutral carriers, mobility, layers', timings.neutral);
+  line('equilibrium with its mesh, mobility, layers', timings.poisson);
+  line('equilibrium alone, with its mesh', timed(() => carriersOf(doping, poisson)));
+  line('the same on the finer mesh', timed(() => carriersOf(dense, poisson)));
+  line(
+    'equilibrium near a known one (warm start)',
+    timed(() => carriersNear(denseFound, { ...poisson, temperature: poisson.temperature + 1 })),
+    `${denseFound.doping.depth.length} nodes`,
+  );
+  const spans = layerSpans(found);
+  line('temperature coefficients', timed(() => temperatureCoefficients(found, poisson, model, spans)));
+  line('spread of the mobility models', timed(() => modelSpread(found, poisson, 'complete', spans)));
+  line('whole, neutral: study to result document', timed(() => solve(withCarriers('neutral'))));
+  line('whole, equilibrium: study to result document', timed(() => solve(withCarriers('poisson'))));
+  return timings;
+}
+
+const withCarriers = (carriers: 'neutral' | 'poisson') => ({
+  ...STUDY,
+  models: { ...STUDY.models, carriers },
+});
+
+/** The doping on evenly finer cells, so that about `count` nodes come out. */
+function ofNodes(doping: SampledDoping, count: number): SampledDoping {
+  const pieces = Math.max(1, Math.round(count / doping.depth.length));
+  const depth: number[] = [];
+  for (let i = 0; i + 2 < doping.depth.length; i += 2)
+    for (let k = 0; k < 2 * pieces; k++)
+      depth.push(doping.depth[i] + ((doping.depth[i + 2] - doping.depth[i]) * k) / (2 * pieces));
+  depth.push(doping.depth[doping.depth.length - 1]);
+  return resample(doping, Float64Array.from(depth));
+}
+
+function numpyChains(ours: Chains): void {
   const script = resolve('bench/chain.py');
   const run = spawnSync('python3', [script, String(RUNS)], { encoding: 'utf8' });
   if (run.status !== 0) {
-    console.log('NumPy chain skipped: python3 with numpy and scipy was not found');
+    console.log('NumPy chains skipped: python3 with numpy and scipy was not found');
     return;
   }
-  const { median_ms: median } = JSON.parse(run.stdout) as { median_ms: number };
-  console.log(`${'same chain in NumPy, 600 depths'.padEnd(46)} ${median.toFixed(3).padStart(9)} ms`);
-  console.log(`NumPy / ours (carriers, mobility, layers, ${nodes}): ${(median / ours.median).toFixed(2)}`);
+  const medians = JSON.parse(run.stdout) as Record<'neutral' | 'poisson', number>;
+  for (const kind of ['neutral', 'poisson'] as const) {
+    console.log(`${`NumPy and SciPy, ${kind}, 600 depths`.padEnd(46)} ${medians[kind].toFixed(3).padStart(9)} ms`);
+    console.log(`  NumPy / ours, ${kind}: ${(medians[kind] / ours[kind].median).toFixed(2)}`);
+  }
 }
 
 function commandLine(): void {
@@ -100,5 +141,5 @@ function commandLine(): void {
 }
 
 console.log(`${cpus()[0]?.model ?? 'unknown processor'}, Node ${process.version}, medians of ${RUNS} warm runs`);
-numpyChain(coreStages(), 'mesh above');
+numpyChains(coreStages());
 commandLine();
