@@ -1,6 +1,6 @@
 /** A table on its way into the study: how it was read, what is in it, which profiles to take. The study waits untouched. */
 
-import { useEffect, useRef } from 'preact/hooks';
+import { useEffect, useLayoutEffect, useRef } from 'preact/hooks';
 import { importing } from '../state/files';
 import { addAll } from '../state/stepActions';
 import { say } from '../state/viewState';
@@ -30,7 +30,7 @@ export function ImportSheet({ table }: Props) {
   const isReady = !isBusy && problem === null && taken > 0 && !lacksDopant;
 
   useEffect(() => heading.current?.focus(), []);
-  useEffect(() => {
+  useLayoutEffect(() => {
     // An answered question takes the focus with it; without one the keys would reach nothing.
     if (document.activeElement === document.body) heading.current?.focus();
   }, [sketch]);
