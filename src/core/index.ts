@@ -22,6 +22,7 @@ export { type SolveOptions, solve } from './solve';
 export { sha256Hex } from './study/hash';
 export {
   CARRIER_NAMES,
+  DIFFUSION_NAMES,
   DIFFUSIVITY_SETS,
   IONISATION_NAMES,
   MOBILITY_NAMES,

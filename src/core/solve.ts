@@ -36,7 +36,7 @@ export interface Prepared {
 /** @throws InputProblem when a table step still names a file. */
 export function prepare(study: Study, { refinement = 1 }: SolveOptions = {}): Prepared {
   const recipe = toRecipe(study);
-  const process = runRecipe(recipe);
+  const process = runRecipe(recipe, refinement);
   const activation = { fraction: process.activeFractions, limit: process.activeLimits };
   const doping = sampleDoping(process.contributions, activation, filmEnd(recipe), refinement);
   const model = mobilityModel(recipe.models.mobility);

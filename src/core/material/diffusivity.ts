@@ -1,4 +1,4 @@
-/** Diffusivities of dopants in silicon, D = D0 exp(-Ea/kT): two named sets, because published ones differ by a factor of two. */
+/** Diffusivities of dopants in silicon, D = D0 exp(-Ea/kT): named sets, because published ones differ by a factor of two. */
 
 import { BOLTZMANN_EV } from './constants';
 import type { Dopant } from './dopants';
@@ -13,6 +13,8 @@ interface Arrhenius {
 /**
  * `fair1981`: intrinsic diffusivities, R. B. Fair in Impurity Doping Processes in Silicon, ed. F. F. Y. Wang (North-Holland
  * 1981), as S. M. Sze quotes them; from memory, indium of low confidence.
+ * `plummer2000`: J. D. Plummer, M. D. Deal, P. B. Griffin, Silicon VLSI Technology (2000), intrinsic table, from memory; gallium and
+ * aluminium as in `fair1981`.
  * `fuller1956`: after C. S. Fuller and J. A. Ditzenberger (J. Appl. Phys. 27, 544, 1956) as R. C. Jaeger, Introduction to
  * Microelectronic Fabrication, Table 4.1, lists them; from memory. Boron and phosphorus there are those of diffusions
  * from a source at the solid solubility and lie 1.7 to 2.1 times above the intrinsic ones.
@@ -24,6 +26,15 @@ export const DIFFUSIVITIES = {
     arsenic: { D0: 24, Ea: 4.08 },
     antimony: { D0: 0.214, Ea: 3.65 },
     indium: { D0: 0.785, Ea: 3.63 },
+    gallium: { D0: 0.374, Ea: 3.39 },
+    aluminium: { D0: 1.385, Ea: 3.41 },
+  },
+  plummer2000: {
+    boron: { D0: 1.0, Ea: 3.5 },
+    phosphorus: { D0: 4.7, Ea: 3.68 },
+    arsenic: { D0: 9.17, Ea: 3.99 },
+    antimony: { D0: 4.58, Ea: 3.88 },
+    indium: { D0: 1.2, Ea: 3.5 },
     gallium: { D0: 0.374, Ea: 3.39 },
     aluminium: { D0: 1.385, Ea: 3.41 },
   },

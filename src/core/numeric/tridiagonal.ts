@@ -19,3 +19,24 @@ export function solveTridiagonal(
   values[count - 1] /= diagonal[count - 1];
   for (let i = count - 2; i >= 0; i--) values[i] = (values[i] + coupling[i] * values[i + 1]) / diagonal[i];
 }
+
+/**
+ * Solves a general system: `lower[i]` multiplies the unknown i - 1, `upper[i]` the unknown i + 1 of row i. `diagonal` is used up, the
+ * solution replaces `values`. The same elimination; stable without pivoting for diagonally dominant columns, as implicit
+ * diffusion has them.
+ */
+export function solveGeneralTridiagonal(
+  lower: Float64Array,
+  diagonal: Float64Array,
+  upper: Float64Array,
+  values: Float64Array,
+): void {
+  const last = values.length - 1;
+  for (let i = 1; i <= last; i++) {
+    const factor = lower[i] / diagonal[i - 1];
+    diagonal[i] -= factor * upper[i - 1];
+    values[i] -= factor * values[i - 1];
+  }
+  values[last] /= diagonal[last];
+  for (let i = last - 1; i >= 0; i--) values[i] = (values[i] - upper[i] * values[i + 1]) / diagonal[i];
+}

@@ -16,6 +16,8 @@ import type {
   RecipeStep,
 } from '../study/recipe';
 import { activation } from './activation';
+import { heatSolved } from './diffusion/heatSolved';
+import type { Source } from './diffusion/source';
 import { epitaxy } from './epitaxy';
 import { etch } from './etch';
 import { dtOf, type HeatTreatment, heatUp, heatWarnings, hottest } from './heat';
@@ -43,17 +45,23 @@ interface Wafer {
   /** Hottest point of the last heat treatment, K. */
   lastHeat?: number;
   addedSilicon: number;
+  /** Of the meshes of solved steps. */
+  refinement: number;
   reports: StepReport[];
   warnings: Warning[];
 }
 
-/** Runs the steps in order on a wafer of uniform doping. */
-export function runRecipe(recipe: Recipe): ProcessResult {
+/**
+ * Runs the steps in order on a wafer of uniform doping.
+ * @param refinement 2 for half the cells of solved steps.
+ */
+export function runRecipe(recipe: Recipe, refinement = 1): ProcessResult {
   const { dopant, concentration } = recipe.wafer;
   const background = uniform(concentration, 0, Number.POSITIVE_INFINITY);
   const wafer: Wafer = {
     contributions: [{ dopant, shape: background, stepIndex: 0 }],
     addedSilicon: 0,
+    refinement,
     reports: [],
     warnings: implantRemarks(recipe.steps),
   };
@@ -131,7 +139,10 @@ function runPredeposition(step: PredepositionStep, wafer: Wafer, recipe: Recipe)
   const heat: HeatTreatment = { ...step, endTemperature: step.temperature };
   const set = recipe.models.diffusivity;
   const { surface, shape } = predeposition(step, dtOf(set, step.dopant, heat));
-  treat(step, wafer, heat, recipe, shape ? [{ dopant: step.dopant, shape, stepIndex: step.index }] : []);
+  const arriving = shape && { dopant: step.dopant, shape, stepIndex: step.index };
+  const source = shape && { dopant: step.dopant, surface, stepIndex: step.index };
+  const before = doseIn(wafer, step.dopant);
+  const solved = treat(step, wafer, heat, recipe, arriving, source);
   if (!shape)
     wafer.warnings.push({
       code: 'predeposition-nothing',
@@ -141,23 +152,22 @@ function runPredeposition(step: PredepositionStep, wafer: Wafer, recipe: Recipe)
   const title = `${step.dopant} predeposition, ${short(step.time / 60)} min at ${short(step.temperature - ZERO_CELSIUS)} °C`;
   report(step, wafer, title, {
     surface_cm3: surface,
-    dose_cm2: shape ? doseOf(shape, Number.POSITIVE_INFINITY) : 0,
+    dose_cm2: doseIn(wafer, step.dopant) - before,
+    ...solved,
     ...dtFigures(presentIn(wafer), (dopant) => dtOf(set, dopant, heat)),
   });
 }
 
 function runAnneal(step: AnnealStep, wafer: Wafer, recipe: Recipe): void {
   const set = recipe.models.diffusivity;
-  treat(step, wafer, step, recipe, []);
+  const solved = treat(step, wafer, step, recipe, null, null);
   const from = short(step.temperature - ZERO_CELSIUS);
   const to =
     step.endTemperature === step.temperature ? '' : ` to ${short(step.endTemperature - ZERO_CELSIUS)}`;
-  report(
-    step,
-    wafer,
-    `anneal, ${short(step.time / 60)} min at ${from}${to} °C`,
-    dtFigures(presentIn(wafer), (dopant) => dtOf(set, dopant, step)),
-  );
+  report(step, wafer, `anneal, ${short(step.time / 60)} min at ${from}${to} °C`, {
+    ...dtFigures(presentIn(wafer), (dopant) => dtOf(set, dopant, step)),
+    ...solved,
+  });
 }
 
 function runEpitaxy(step: EpitaxyStep, wafer: Wafer): void {
@@ -179,22 +189,49 @@ function runEtch(step: EtchStep, wafer: Wafer): void {
   });
 }
 
-/** Heats what is there; what arrives during the treatment has its share of it already. */
+/**
+ * Heats what is there. With closed forms, what arrives during the treatment has its share of it already; solved, it enters from a
+ * surface that is held.
+ * @returns what a solved treatment tells of itself.
+ */
 function treat(
   step: RecipeStep,
   wafer: Wafer,
   heat: HeatTreatment,
   recipe: Recipe,
-  arriving: readonly Contribution[],
-): void {
-  const set = recipe.models.diffusivity;
-  wafer.warnings.push(...heatWarnings([...wafer.contributions, ...arriving], set, heat, step.index));
-  wafer.contributions = [...heatUp(wafer.contributions, set, heat), ...arriving];
+  arriving: Contribution | null,
+  source: Source | null,
+): StepReport['figures'] {
+  const { diffusivity: set, diffusion } = recipe.models;
   wafer.lastHeat = hottest(heat);
+  const remarked = arriving ? [...wafer.contributions, arriving] : wafer.contributions;
+  const warnings = heatWarnings(remarked, set, heat, step.index);
+  if (diffusion === 'constant') {
+    wafer.warnings.push(...warnings);
+    wafer.contributions = [...heatUp(wafer.contributions, set, heat), ...(arriving ? [arriving] : [])];
+    return {};
+  }
+  wafer.warnings.push(...warnings.filter(({ code }) => code !== 'extrinsic-diffusion'));
+  const { thickness, buriedOxide } = recipe.wafer;
+  const filmEnd = Math.min(thickness, buriedOxide ?? Number.POSITIVE_INFINITY) + wafer.addedSilicon;
+  const solved = heatSolved(wafer.contributions, set, heat, filmEnd, source, wafer.refinement);
+  wafer.contributions = solved.contributions;
+  return {
+    nodes: solved.nodes,
+    timeSteps: solved.steps,
+    ...(solved.doseError !== null && { doseError_ppm: solved.doseError * 1e6 }),
+  };
 }
 
 function report(step: RecipeStep, wafer: Wafer, title: string, figures: StepReport['figures']): void {
   wafer.reports.push({ index: step.index, kind: step.kind, title, figures });
+}
+
+/** What recipe steps and the depth that is solved hold of a dopant, cm^-2; the wafer itself is endless. */
+function doseIn(wafer: Wafer, dopant: Dopant): number {
+  return wafer.contributions
+    .filter((part) => part.dopant === dopant && !(part.stepIndex === 0 && part.shape.kind === 'uniform'))
+    .reduce((sum, { shape }) => sum + doseOf(shape, Number.POSITIVE_INFINITY), 0);
 }
 
 function presentIn(wafer: Wafer): Set<Dopant> {

@@ -19,9 +19,13 @@ export type NarrowingName = (typeof NARROWING_NAMES)[number];
 export const RANGE_SETS = ['universal', 'lss1975'] as const;
 export type RangeSet = (typeof RANGE_SETS)[number];
 
-/** `fair1981`: intrinsic diffusivities; `fuller1956`: those of heavily doped diffusions. */
-export const DIFFUSIVITY_SETS = ['fair1981', 'fuller1956'] as const;
+/** `fair1981`, `plummer2000`: intrinsic diffusivities and their charge states; `fuller1956`: those of heavily doped diffusions. */
+export const DIFFUSIVITY_SETS = ['fair1981', 'plummer2000', 'fuller1956'] as const;
 export type DiffusivitySet = (typeof DIFFUSIVITY_SETS)[number];
+
+/** `constant`: closed forms with the intrinsic diffusivity; `extrinsic`: solved, all dopants coupled through the carriers. */
+export const DIFFUSION_NAMES = ['constant', 'extrinsic'] as const;
+export type DiffusionName = (typeof DIFFUSION_NAMES)[number];
 
 export const TABLE_DELIMITERS = ['tab', 'semicolon', 'comma', 'pipe', 'space'] as const;
 export type TableDelimiter = (typeof TABLE_DELIMITERS)[number];

@@ -4,7 +4,7 @@
  */
 
 import type { Dopant, ImplantSpecies } from '../material/dopants';
-import type { DiffusivitySet, MobilityName, NarrowingName, RangeSet } from './names';
+import type { DiffusionName, DiffusivitySet, MobilityName, NarrowingName, RangeSet } from './names';
 
 interface Numbered {
   /** Position in the document, counted from 1, disabled steps included. */
@@ -108,6 +108,7 @@ export interface Recipe {
     readonly mobility: MobilityName;
     readonly activation: ActivationChoice;
     readonly diffusivity: DiffusivitySet;
+    readonly diffusion: DiffusionName;
     readonly carriers: 'poisson' | 'neutral';
     readonly ionisation: 'levels' | 'complete';
     readonly statistics: 'boltzmann' | 'fermi-dirac';

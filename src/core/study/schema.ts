@@ -9,6 +9,7 @@ import { z } from 'zod';
 import { DOPANTS, IMPLANT_SPECIES } from '../material/dopants';
 import {
   CARRIER_NAMES,
+  DIFFUSION_NAMES,
   DIFFUSIVITY_SETS,
   IONISATION_NAMES,
   MOBILITY_NAMES,
@@ -173,6 +174,7 @@ const models = z.strictObject({
   activation: z.union([z.enum(['full', 'solubility']), z.partialRecord(dopant, fraction)]).default('full'),
   ranges: z.enum(RANGE_SETS).default('universal'),
   diffusivity: z.enum(DIFFUSIVITY_SETS).default('fair1981'),
+  diffusion: z.enum(DIFFUSION_NAMES).default('constant'),
 });
 
 /** What the surface does to the carriers below; without it there is no field. One of the two keys. */

@@ -33,6 +33,7 @@ export function toRecipe(study: Study): Recipe {
       mobility: models.mobility,
       activation: models.activation,
       diffusivity: models.diffusivity,
+      diffusion: models.diffusion,
       carriers: models.carriers,
       ionisation: models.ionisation,
       statistics: models.statistics,

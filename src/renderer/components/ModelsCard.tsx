@@ -4,6 +4,7 @@ import { DOPANT_FACTS, MOBILITY_MODELS, type Study } from '../../core/index';
 import { withStudy } from '../state/draft';
 import {
   CARRIER_OPTIONS,
+  DIFFUSION_OPTIONS,
   IONISATION_OPTIONS,
   NARROWING_OPTIONS,
   STATISTICS_OPTIONS,
@@ -86,6 +87,13 @@ export function ModelsCard() {
         options={RANGE_OPTIONS}
         chosen={models.ranges}
         choose={(name) => setModel('ranges', 'ion ranges', name as Models['ranges'])}
+      />
+      <ChoiceField
+        path="models.diffusion"
+        label="Diffusion"
+        options={DIFFUSION_OPTIONS}
+        chosen={models.diffusion}
+        choose={(name) => setModel('diffusion', 'how diffusion is computed', name as Models['diffusion'])}
       />
       <ChoiceField
         path="models.diffusivity"

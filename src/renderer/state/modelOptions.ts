@@ -1,6 +1,12 @@
 /** What the choices about carriers are called for people. */
 
-import { CARRIER_NAMES, IONISATION_NAMES, NARROWING_NAMES, STATISTICS_NAMES } from '../../core/index';
+import {
+  CARRIER_NAMES,
+  DIFFUSION_NAMES,
+  IONISATION_NAMES,
+  NARROWING_NAMES,
+  STATISTICS_NAMES,
+} from '../../core/index';
 
 type Option = { readonly value: string; readonly name: string };
 
@@ -15,6 +21,11 @@ export const CARRIER_OPTIONS = named(CARRIER_NAMES, {
 export const IONISATION_OPTIONS = named(IONISATION_NAMES, {
   levels: 'dopant levels (Altermatt 2006)',
   complete: 'complete',
+});
+
+export const DIFFUSION_OPTIONS = named(DIFFUSION_NAMES, {
+  constant: 'closed forms, constant D',
+  extrinsic: 'solved, coupled by carriers',
 });
 
 export const STATISTICS_OPTIONS = named(STATISTICS_NAMES, {

@@ -51,6 +51,7 @@ const RANGE_NAMES: Record<(typeof RANGE_SETS)[number], string> = {
 };
 const DIFFUSIVITY_NAMES: Record<(typeof DIFFUSIVITY_SETS)[number], string> = {
   fair1981: 'Fair 1981, intrinsic',
+  plummer2000: 'Plummer, Deal, Griffin 2000',
   fuller1956: 'Fuller, Ditzenberger 1956',
 };
 

@@ -70,6 +70,7 @@ export function emptyStudy(): Study {
       activation: 'full',
       ranges: 'universal',
       diffusivity: 'fair1981',
+      diffusion: 'constant',
     },
   };
 }
