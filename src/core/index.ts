@@ -3,10 +3,13 @@
 export { type BiasResult, type BiasSpan, biasSweep } from './explore/bias';
 export { type TemperatureResult, type TemperatureSpan, temperatureSweep } from './explore/temperature';
 export { DOPANT_FACTS, DOPANTS, type Dopant, IMPLANT_SPECIES, type ImplantSpecies } from './material/dopants';
+export { ELEMENTS } from './material/elements';
 export { concentrationOf, resistivityOf } from './material/mf723';
+export { TARGETS } from './material/targets';
 export { MOBILITY_MODELS } from './mobility/list';
 export { uniformResistivity } from './mobility/resistivity';
 export { rangeStatistics } from './process/ranges';
+export { rangeMoments } from './process/stopping/moments';
 export { csvText } from './report/csv';
 export { type ColumnTable, columnsTable, type RowTable, readingsTable } from './report/tables';
 export type {

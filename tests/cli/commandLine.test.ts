@@ -269,7 +269,19 @@ describe('range', () => {
       'lss1975',
     ]);
     expect(status).toBe(0);
-    expect(stdout).toMatch(/^arsenic, 100 keV, into oxide \(lss1975 ranges\)$/m);
+    expect(stdout).toMatch(/^arsenic, 100 keV, into oxide \(lss1975 ranges, fits or tables\)$/m);
+  });
+
+  test('solves the transport equation for any element and target, and for dopants as the fits have it', () => {
+    const solved = JSON.parse(call(['range', '--ion', 'P', '--energy', '80', '--solve', '--json']).stdout);
+    const fitted = JSON.parse(call(['range', '--ion', 'P', '--energy', '80', '--json']).stdout);
+    expect(solved.projectedRange_um / fitted.projectedRange_um).toBeCloseTo(1, 2);
+    const resist = call(['range', '--ion', 'Ge', '--energy', '120', '--target', 'photoresist', '--solve']);
+    expect(resist.status).toBe(0);
+    expect(resist.stdout).toMatch(/^Ge, 120 keV, into photoresist \(universal ranges, solved\)$/m);
+    const without = call(['range', '--ion', 'Ge', '--energy', '120']);
+    expect([without.status, without.stdout]).toEqual([2, '']);
+    expect(without.stderr).toMatch(/add --solve/);
   });
 
   test('names what is allowed', () => {

@@ -1,24 +1,52 @@
 /** `range`: where implanted ions come to rest. */
 
 import { Command, Option } from 'commander';
-import { type ImplantSpecies, RANGE_SETS, rangeStatistics } from '../../core/index';
+import {
+  DOPANT_FACTS,
+  ELEMENTS,
+  type ImplantSpecies,
+  InputProblem,
+  RANGE_SETS,
+  rangeMoments,
+  rangeStatistics,
+  TARGETS,
+  type Warning,
+} from '../../core/index';
 import { ion, quantity } from '../options';
 import { answer, figure, json, pairs, tellWarnings } from '../text';
 
+type TargetName = keyof typeof TARGETS;
+
 interface Options {
-  ion: ImplantSpecies;
+  ion: string;
   energy: number;
-  target: 'silicon' | 'oxide' | 'nitride';
+  target: TargetName;
   ranges: (typeof RANGE_SETS)[number];
+  solve?: boolean;
   json?: boolean;
 }
 
+interface Found {
+  projectedRange: number;
+  straggle: number;
+  lateralStraggle: number;
+  skewness: number;
+  kurtosis: number;
+  warnings: readonly Warning[];
+}
+
 const UM_PER_CM = 1e4;
+/** Boron's share of the energy of a BF2 ion, by mass numbers. */
+const BORON_IN_BF2 = 11 / 49;
 
 export function rangeCommand(): Command {
   return new Command('range')
     .description('Projected range, straggle and shape of an implant in an amorphous target.')
-    .requiredOption('--ion <ion>', 'a dopant by name or symbol, or BF2', ion)
+    .requiredOption(
+      '--ion <ion>',
+      'a dopant by name or symbol, or BF2; with --solve any element known here',
+      anyIon,
+    )
     .requiredOption(
       '--energy <keV>',
       'ion energy, such as 60 or "2 MeV"',
@@ -26,20 +54,23 @@ export function rangeCommand(): Command {
     )
     .addOption(
       new Option('--target <material>', 'what the ions enter')
-        .choices(['silicon', 'oxide', 'nitride'])
+        .choices(Object.keys(TARGETS))
         .default('silicon'),
     )
     .addOption(new Option('--ranges <set>', 'set of range data').choices(RANGE_SETS).default('universal'))
+    .option('--solve', 'solve the transport equation instead of using fits or tables')
     .option('--json', 'print a JSON document')
     .addHelpText(
       'after',
       `
 Examples:
   $ ohmstrata range --ion B --energy 60
-  $ ohmstrata range --ion As --energy "150 keV" --target oxide --ranges lss1975 --json`,
+  $ ohmstrata range --ion As --energy "150 keV" --target oxide --ranges lss1975 --json
+  $ ohmstrata range --ion Ge --energy 120 --target photoresist --solve`,
     )
-    .action(({ ion: species, energy, target, ranges, json: asJson }: Options) => {
-      const found = rangeStatistics({ species, energy_keV: energy, target, set: ranges });
+    .action((options: Options) => {
+      const { ion: species, energy, target, ranges } = options;
+      const found = options.solve ? solved(options) : fitted(options);
       const values = {
         projectedRange_um: found.projectedRange * UM_PER_CM,
         straggle_um: found.straggle * UM_PER_CM,
@@ -47,16 +78,46 @@ Examples:
         skewness: found.skewness,
         kurtosis: found.kurtosis,
       };
-      if (asJson)
+      const how = options.solve ? 'solved' : 'fits or tables';
+      if (options.json)
         return answer(
-          json({ ion: species, energy_keV: energy, target, ranges, ...values, warnings: found.warnings }),
+          json({
+            ion: species,
+            energy_keV: energy,
+            target,
+            ranges,
+            how,
+            ...values,
+            warnings: found.warnings,
+          }),
         );
       answer(
         [
-          `${species}, ${energy} keV, into ${target} (${ranges} ranges)`,
+          `${species}, ${energy} keV, into ${target} (${ranges} ranges, ${how})`,
           pairs(Object.entries(values).map(([name, value]) => [name, figure(value)])),
         ].join('\n'),
       );
       tellWarnings(found.warnings);
     });
+}
+
+/** A dopant as the fits know it, or the symbol of an element. */
+function anyIon(text: string): string {
+  const symbol = [...ELEMENTS.keys()].find((each) => each.toLowerCase() === text.trim().toLowerCase());
+  const isDopant = Object.values(DOPANT_FACTS).some((facts) => facts.symbol === symbol);
+  return symbol && !isDopant ? symbol : ion(text);
+}
+
+function fitted({ ion: species, energy, target, ranges }: Options): Found {
+  if (target === 'photoresist' || ELEMENTS.has(species))
+    throw new InputProblem(`${species} in ${target} has no fit or table; add --solve`);
+  return rangeStatistics({ species: species as ImplantSpecies, energy_keV: energy, target, set: ranges });
+}
+
+function solved({ ion: species, energy, target, ranges }: Options): Found {
+  const isMolecule = species === 'BF2';
+  const dopant = DOPANT_FACTS[species as keyof typeof DOPANT_FACTS];
+  const symbol = isMolecule ? 'B' : (dopant?.symbol ?? species);
+  const moments = rangeMoments(symbol, isMolecule ? energy * BORON_IN_BF2 : energy, TARGETS[target], ranges);
+  return { ...moments, warnings: [] };
 }
