@@ -4,6 +4,7 @@ import { Command } from 'commander';
 import { PROGRAM_VERSION } from '../core/index';
 import { biasCommand } from './commands/bias';
 import { checkCommand } from './commands/check';
+import { historyCommand } from './commands/history';
 import { importCommand } from './commands/importTable';
 import { rangeCommand } from './commands/range';
 import { resistivityCommand } from './commands/resistivity';
@@ -38,6 +39,7 @@ export function program(): Command {
     solveCommand(),
     resistivityCommand(),
     rangeCommand(),
+    historyCommand(),
     temperatureCommand(),
     biasCommand(),
     importCommand(),

@@ -1,11 +1,12 @@
 /** The public face of the calculation: all that the window and the command line may import. */
 
 export { type BiasResult, type BiasSpan, biasSweep } from './explore/bias';
+export { type HistoryResult, recipeHistory } from './explore/history';
 export { type TemperatureResult, type TemperatureSpan, temperatureSweep } from './explore/temperature';
 export { DOPANT_FACTS, DOPANTS, type Dopant, IMPLANT_SPECIES, type ImplantSpecies } from './material/dopants';
 export { ELEMENTS } from './material/elements';
 export { concentrationOf, resistivityOf } from './material/mf723';
-export { TARGETS } from './material/targets';
+export { TARGETS, type TargetName } from './material/targets';
 export { MOBILITY_MODELS } from './mobility/list';
 export { uniformResistivity } from './mobility/resistivity';
 export { rangeStatistics } from './process/ranges';

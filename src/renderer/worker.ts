@@ -5,7 +5,9 @@ import {
   type BiasResult,
   type BiasSpan,
   biasSweep,
+  type HistoryResult,
   InputProblem,
+  recipeHistory,
   type Solution,
   type Study,
   solve,
@@ -49,6 +51,8 @@ const calculations = {
 
   temperature: (study: Study, span: TemperatureSpan): Swept<TemperatureResult> =>
     swept(() => temperatureSweep(study, span)),
+
+  history: (study: Study): Swept<HistoryResult> => swept(() => recipeHistory(study)),
 
   bias: (study: Study, span: BiasSpan): Swept<BiasResult> => swept(() => biasSweep(study, span)),
 };

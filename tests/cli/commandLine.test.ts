@@ -395,6 +395,7 @@ describe('check, schema, help', () => {
     ['solve'],
     ['resistivity'],
     ['range'],
+    ['history'],
     ['temperature'],
     ['bias'],
     ['import'],

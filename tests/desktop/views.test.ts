@@ -3,7 +3,7 @@
 import { readFileSync } from 'node:fs';
 import axe from 'axe-core';
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { biasSweep, parseStudy, solve, temperatureSweep } from '../../src/core/index';
+import { biasSweep, parseStudy, recipeHistory, solve, temperatureSweep } from '../../src/core/index';
 import { type Desktop, launch } from './launch';
 import { Person } from './person';
 
@@ -69,6 +69,20 @@ test('a wrong span says what is allowed beside its field', async () => {
 });
 
 test('no accessibility rule is broken in it', async () => {
+  expect(await violations()).toEqual([]);
+});
+
+test('the steps view shows the wafer after every step', async () => {
+  await person.button('Steps').click();
+  await desktop.page.getByRole('region', { name: 'Layers after every step' }).waitFor();
+  const { entries } = recipeHistory(STUDY);
+  const rows = await Promise.all(entries.map((_, row) => cells('Layers after every step', row)));
+  rows.forEach(([step, what, , sheets], k) => {
+    expect([step, what]).toEqual([String(entries[k].step), entries[k].title]);
+    expect(numberIn(sheets.split(' / ')[0]) / entries[k].layers[0].sheetResistance_ohmSq).toBeCloseTo(1, 3);
+  });
+  await desktop.page.waitForTimeout(400);
+  await desktop.screenshot('steps-light');
   expect(await violations()).toEqual([]);
 });
 

@@ -10,12 +10,11 @@ import {
   rangeMoments,
   rangeStatistics,
   TARGETS,
+  type TargetName,
   type Warning,
 } from '../../core/index';
 import { ion, quantity } from '../options';
 import { answer, figure, json, pairs, tellWarnings } from '../text';
-
-type TargetName = keyof typeof TARGETS;
 
 interface Options {
   ion: string;

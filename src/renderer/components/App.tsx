@@ -6,6 +6,7 @@ import { panel, VIEW_NAMES, view } from '../state/viewState';
 import { About } from './About';
 import { BiasView } from './BiasView';
 import { CommandSearch } from './CommandSearch';
+import { HistoryView } from './HistoryView';
 import { PictureDialog } from './PictureDialog';
 import { OpenQuestion } from './QuestionDialog';
 import { Readings } from './Readings';
@@ -27,6 +28,7 @@ export function App() {
       <Recipe />
       <main class="middle" aria-label={VIEW_NAMES[view.value]}>
         {view.value === 'tracks' && <Tracks />}
+        {view.value === 'history' && <HistoryView />}
         {view.value === 'temperature' && <TemperatureView />}
         {view.value === 'bias' && <BiasView />}
         {importing.value && <ImportSheet key={importing.value} table={importing.value} />}

@@ -1,7 +1,14 @@
 /** The sweeps that a view of the window shows: asked of the worker while their view is open, at every change of study or span. */
 
 import { effect, type Signal, signal } from '@preact/signals';
-import type { BiasResult, BiasSpan, Study, TemperatureResult, TemperatureSpan } from '../../core/index';
+import type {
+  BiasResult,
+  BiasSpan,
+  HistoryResult,
+  Study,
+  TemperatureResult,
+  TemperatureSpan,
+} from '../../core/index';
 import type { Swept } from '../worker';
 import { latestWins } from './latest';
 import { calculations } from './solver';
@@ -14,6 +21,9 @@ export const biasSpan = signal<BiasSpan>({ layer: 1, junctions: 'both', from_V: 
 /** The newest answer; null before the first. */
 export const temperatureSwept = signal<Swept<TemperatureResult> | null>(null);
 export const biasSwept = signal<Swept<BiasResult> | null>(null);
+export const historySwept = signal<Swept<HistoryResult> | null>(null);
+/** The history has no span: it is that of the whole recipe. */
+const wholeRecipe = signal(null);
 
 function follow<Span, Result>(
   name: View,
@@ -39,6 +49,7 @@ const stopped = (error: unknown): Swept<never> => ({
 });
 
 export function followSweeps(): void {
+  follow('history', wholeRecipe, historySwept, (of) => calculations.history(of));
   follow('temperature', temperatureSpan, temperatureSwept, (of, span) => calculations.temperature(of, span));
   follow('bias', biasSpan, biasSwept, (of, span) => calculations.bias(of, span));
 }

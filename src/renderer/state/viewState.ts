@@ -9,9 +9,10 @@ import { bridge } from './bridge';
 import { shown } from './solver';
 
 /** What the middle of the window shows. */
-export type View = 'tracks' | 'temperature' | 'bias';
+export type View = 'tracks' | 'history' | 'temperature' | 'bias';
 export const VIEW_NAMES: Record<View, string> = {
   tracks: 'Predict',
+  history: 'Steps',
   temperature: 'Temperature',
   bias: 'Bias',
 };

@@ -14,13 +14,17 @@ export interface SweepFigure {
   readonly lines: readonly Line[];
   readonly xTitle: string;
   readonly yTitle: string;
+  /** Logarithmic upwards. */
+  readonly log?: boolean;
 }
 
 const DASHES = ['solid', '7px,3px', '2px,3px', '9px,3px,2px,3px', '12px,4px'];
 const FONT_SIZE = 12;
+/** Fewer points than this are marked. */
+const FEW = 20;
 
 export function buildSweepFigure(
-  { lines, xTitle, yTitle }: SweepFigure,
+  { lines, xTitle, yTitle, log = false }: SweepFigure,
   theme: Theme,
   font: string,
   size: Size,
@@ -42,7 +46,7 @@ export function buildSweepFigure(
   return {
     data: lines.map(({ name, x, y }, k) => ({
       type: 'scatter',
-      mode: 'lines',
+      mode: x.length < FEW ? 'lines+markers' : 'lines',
       name,
       x,
       y,
@@ -59,7 +63,12 @@ export function buildSweepFigure(
       hovermode: 'x unified',
       hoverlabel: { bgcolor: palette.ground, bordercolor: palette.axis, font: { color: palette.ink } },
       xaxis: { ...axis, title: { text: xTitle, standoff: 6 } },
-      yaxis: { ...axis, title: { text: yTitle, standoff: 8 }, exponentformat: 'none' },
+      yaxis: {
+        ...axis,
+        type: log ? 'log' : 'linear',
+        title: { text: yTitle, standoff: 8 },
+        exponentformat: log ? 'power' : 'none',
+      },
     },
   };
 }
