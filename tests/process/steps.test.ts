@@ -138,7 +138,7 @@ describe('epitaxy and etching', () => {
   });
 
   test('etching takes the top with the dopant in it, and tells how much that was', () => {
-    const { contributions, removedDose } = etch([boron], { kind: 'etch', index: 2, thickness: 0.2 * UM });
+    const { contributions, removedDose } = etch([boron], { thickness: 0.2 * UM });
     const left = evaluator(contributions[0].shape);
     expect(left(0.05 * UM) / evaluator(boron.shape)(0.25 * UM)).toBeCloseTo(1, 12);
     const whole = doseOf(boron.shape, ALL);
@@ -148,14 +148,14 @@ describe('epitaxy and etching', () => {
 
   test('what is grown and etched again is where it was', () => {
     const grown = epitaxy([boron], { kind: 'epitaxy', index: 2, thickness: 0.7 * UM, concentration: 0 });
-    const { contributions } = etch(grown, { kind: 'etch', index: 3, thickness: 0.7 * UM });
+    const { contributions } = etch(grown, { thickness: 0.7 * UM });
     for (const um of [0, 0.15, 0.2, 0.4])
       expect(evaluator(contributions[0].shape)(um * UM) / evaluator(boron.shape)(um * UM)).toBeCloseTo(1, 9);
   });
 
   test('the wafer’s own doping does not count as removed', () => {
     const wafer: Contribution = { dopant: 'boron', shape: uniform(1e15, 0, ALL), stepIndex: 0 };
-    expect(etch([wafer], { kind: 'etch', index: 1, thickness: UM }).removedDose).toBe(0);
+    expect(etch([wafer], { thickness: UM }).removedDose).toBe(0);
   });
 });
 

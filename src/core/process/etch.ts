@@ -10,7 +10,10 @@ export interface Etched {
   readonly removedDose: number;
 }
 
-export function etch(contributions: readonly Contribution[], { thickness }: EtchStep): Etched {
+export function etch(
+  contributions: readonly Contribution[],
+  { thickness }: Pick<EtchStep, 'thickness'>,
+): Etched {
   const fromSteps = contributions.filter(({ stepIndex }) => stepIndex > 0);
   return {
     contributions: contributions.map((part) => ({ ...part, shape: strip(part.shape, thickness) })),

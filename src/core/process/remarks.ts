@@ -2,8 +2,9 @@
 
 import { ZERO_CELSIUS } from '../material/constants';
 import { dopantOf } from '../material/dopants';
+import { OXIDATION_RANGE } from '../material/oxidation';
 import type { Warning } from '../study/problem';
-import type { RecipeStep } from '../study/recipe';
+import type { OxidationStep, RecipeStep } from '../study/recipe';
 import { hottest } from './heat';
 
 /** Below this, K, damage speeds diffusion up for as long as a furnace anneal lasts. */
@@ -33,6 +34,26 @@ export function implantRemarks(steps: readonly RecipeStep[]): Warning[] {
       message:
         'implant damage can move boron and phosphorus several times further than this in an anneal below 950 °C (transient enhanced diffusion), which is not computed',
       step: heat.index,
+    });
+  return warnings;
+}
+
+/** What growing oxide does that is not computed, and where its rate is extrapolated. */
+export function oxidationWarnings({ temperature, index }: OxidationStep): Warning[] {
+  const [low, high] = OXIDATION_RANGE;
+  const warnings: Warning[] = [
+    {
+      code: 'oxidation-redistribution',
+      message:
+        'oxidation draws boron into the oxide, piles phosphorus and arsenic up before it and speeds the diffusion of boron and phosphorus up: none of this is computed, only the silicon that is consumed',
+      step: index,
+    },
+  ];
+  if (temperature < low || temperature > high)
+    warnings.push({
+      code: 'oxidation-range',
+      message: `the growth of oxide is extrapolated outside ${low - ZERO_CELSIUS} to ${high - ZERO_CELSIUS} °C`,
+      step: index,
     });
   return warnings;
 }

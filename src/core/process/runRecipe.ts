@@ -2,6 +2,7 @@
 
 import { ZERO_CELSIUS } from '../material/constants';
 import type { Dopant } from '../material/dopants';
+import { CONSUMED, oxideThickness } from '../material/oxidation';
 import type { Contribution } from '../profile/doping';
 import { doseOf, erfcShape, gaussian, type Shape, table, uniform } from '../profile/shape';
 import type { Warning } from '../study/problem';
@@ -11,6 +12,7 @@ import type {
   EpitaxyStep,
   EtchStep,
   ImplantStep,
+  OxidationStep,
   PredepositionStep,
   Recipe,
   RecipeStep,
@@ -23,7 +25,7 @@ import { etch } from './etch';
 import { dtOf, type HeatTreatment, heatUp, heatWarnings, hottest } from './heat';
 import { implant } from './implant';
 import { predeposition } from './predeposition';
-import { implantRemarks } from './remarks';
+import { implantRemarks, oxidationWarnings } from './remarks';
 import { dtFigures, type StepReport, short, UM_PER_CM } from './report';
 
 export interface ProcessResult {
@@ -39,12 +41,16 @@ export interface ProcessResult {
   addedSilicon: number;
 }
 
+const NM_PER_CM = 1e7;
+
 /** What has become of the wafer so far. */
 interface Wafer {
   contributions: Contribution[];
   /** Hottest point of the last heat treatment, K. */
   lastHeat?: number;
   addedSilicon: number;
+  /** Grown on the wafer and not stripped, cm. */
+  oxide: number;
   /** Of the meshes of solved steps. */
   refinement: number;
   reports: StepReport[];
@@ -61,6 +67,7 @@ export function runRecipe(recipe: Recipe, refinement = 1): ProcessResult {
   const wafer: Wafer = {
     contributions: [{ dopant, shape: background, stepIndex: 0 }],
     addedSilicon: 0,
+    oxide: 0,
     refinement,
     reports: [],
     warnings: implantRemarks(recipe.steps),
@@ -92,7 +99,7 @@ function run(step: RecipeStep, wafer: Wafer, recipe: Recipe): void {
       place(step, wafer, table(step.depth, step.concentration), 'tabulated profile');
       break;
     case 'implant':
-      runImplant(step, wafer);
+      runImplant(throughOxide(step, wafer.oxide), wafer);
       break;
     case 'predeposition':
       runPredeposition(step, wafer, recipe);
@@ -105,6 +112,13 @@ function run(step: RecipeStep, wafer: Wafer, recipe: Recipe): void {
       break;
     case 'etch':
       runEtch(step, wafer);
+      break;
+    case 'oxidation':
+      runOxidation(step, wafer, recipe);
+      break;
+    case 'stripOxide':
+      report(step, wafer, 'oxide stripped', { stripped_nm: wafer.oxide * NM_PER_CM });
+      wafer.oxide = 0;
       break;
   }
 }
@@ -186,6 +200,34 @@ function runEtch(step: EtchStep, wafer: Wafer): void {
   report(step, wafer, `etch of ${short(step.thickness * UM_PER_CM)} um`, {
     removed_um: step.thickness * UM_PER_CM,
     removedDose_cm2: removedDose,
+  });
+}
+
+/** Oxide that lies on the wafer screens an implant together with what the step states. */
+function throughOxide(step: ImplantStep, oxide: number): ImplantStep {
+  if (oxide === 0) return step;
+  return { ...step, screen: { material: 'oxide', thickness: oxide + (step.screen?.thickness ?? 0) } };
+}
+
+/** Oxide grows, the dopants diffuse meanwhile, and the silicon that became oxide is gone with what it holds. */
+function runOxidation(step: OxidationStep, wafer: Wafer, recipe: Recipe): void {
+  const heat: HeatTreatment = { ...step, endTemperature: step.temperature };
+  const set = recipe.models.diffusivity;
+  const solved = treat(step, wafer, heat, recipe, null, null);
+  const before = wafer.oxide;
+  wafer.oxide = oxideThickness(step.ambient, recipe.wafer.orientation, step.temperature, step.time, before);
+  const consumed = CONSUMED * (wafer.oxide - before);
+  const { contributions, removedDose } = etch(wafer.contributions, { thickness: consumed });
+  wafer.contributions = contributions;
+  wafer.addedSilicon -= consumed;
+  wafer.warnings.push(...oxidationWarnings(step));
+  const title = `${step.ambient} oxidation, ${short(step.time / 60)} min at ${short(step.temperature - ZERO_CELSIUS)} °C`;
+  report(step, wafer, title, {
+    oxide_nm: wafer.oxide * NM_PER_CM,
+    consumed_nm: consumed * NM_PER_CM,
+    removedDose_cm2: removedDose,
+    ...dtFigures(presentIn(wafer), (dopant) => dtOf(set, dopant, heat)),
+    ...solved,
   });
 }
 

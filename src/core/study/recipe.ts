@@ -80,6 +80,17 @@ export interface EtchStep extends Numbered {
   readonly thickness: number;
 }
 
+export interface OxidationStep extends Numbered {
+  readonly kind: 'oxidation';
+  readonly ambient: 'dry' | 'wet';
+  readonly temperature: number;
+  readonly time: number;
+}
+
+export interface StripOxideStep extends Numbered {
+  readonly kind: 'stripOxide';
+}
+
 export type RecipeStep =
   | GaussianStep
   | ErfcStep
@@ -89,7 +100,9 @@ export type RecipeStep =
   | PredepositionStep
   | AnnealStep
   | EpitaxyStep
-  | EtchStep;
+  | EtchStep
+  | OxidationStep
+  | StripOxideStep;
 
 export type ActivationChoice = 'full' | 'solubility' | Readonly<Partial<Record<Dopant, number>>>;
 
@@ -101,6 +114,7 @@ export interface Recipe {
     readonly dopant: Dopant;
     readonly concentration: number;
     readonly thickness: number;
+    readonly orientation: '100' | '111';
     readonly buriedOxide?: number;
   };
   readonly steps: readonly RecipeStep[];

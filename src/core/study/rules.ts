@@ -8,6 +8,7 @@ export function crossFieldProblems(study: Study): StudyProblem[] {
   return [
     ...waferProblems(study),
     ...surfaceProblems(study),
+    ...oxideProblems(study),
     ...study.steps.flatMap((step, i) => stepProblems(step, `steps[${i}]`)),
   ];
 }
@@ -38,6 +39,25 @@ function surfaceProblems({ surface }: Study): StudyProblem[] {
       message: `the surface is ${given.length === 0 ? 'not stated' : 'stated twice'}; give either charge_cm2 or potential_V, or leave surface out`,
     },
   ];
+}
+
+/** Steps that need bare silicon must not come while grown oxide lies on it. */
+function oxideProblems({ steps }: Study): StudyProblem[] {
+  let grownBy: number | null = null;
+  return steps.flatMap((step, i): StudyProblem[] => {
+    if (step.disabled) return [];
+    if (step.step === 'oxidation') grownBy = i;
+    if (step.step === 'stripOxide') grownBy = null;
+    const needsSilicon = step.step === 'epitaxy' || step.step === 'etch' || step.step === 'predeposition';
+    const hasNitride = step.step === 'implant' && step.screen?.material === 'nitride';
+    if (grownBy === null || !(needsSilicon || hasNitride)) return [];
+    return [
+      {
+        key: `steps[${i}]`,
+        message: `${hasNitride ? 'a nitride screen' : step.step} cannot come on the oxide of steps[${grownBy}]; put a stripOxide step before it`,
+      },
+    ];
+  });
 }
 
 function stepProblems(step: StudyStep, key: string): StudyProblem[] {

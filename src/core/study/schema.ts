@@ -141,6 +141,17 @@ const epitaxy = z.strictObject({
 
 const etch = z.strictObject({ step: z.literal('etch'), thickness_um: between(1e-5, 1e3), ...common });
 
+const oxidation = z.strictObject({
+  step: z.literal('oxidation'),
+  ambient: z.enum(['dry', 'wet']),
+  temperature_C: between(600, 1300),
+  time_min: time,
+  ...common,
+});
+
+/** Takes away all oxide that the recipe has grown. */
+const stripOxide = z.strictObject({ step: z.literal('stripOxide'), ...common });
+
 export const stepSchema = z.discriminatedUnion('step', [
   gaussian,
   erfc,
@@ -151,6 +162,8 @@ export const stepSchema = z.discriminatedUnion('step', [
   anneal,
   epitaxy,
   etch,
+  oxidation,
+  stripOxide,
 ]);
 
 const wafer = z.strictObject({

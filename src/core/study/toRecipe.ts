@@ -26,6 +26,7 @@ export function toRecipe(study: Study): Recipe {
       concentration:
         wafer.concentration_cm3 ?? concentrationOf(wafer.dopant, wafer.resistivity_ohmCm as number).value,
       thickness: wafer.thickness_um * CM_PER_UM,
+      orientation: wafer.orientation,
       buriedOxide: wafer.buriedOxide_um === undefined ? undefined : wafer.buriedOxide_um * CM_PER_UM,
     },
     steps: study.steps.flatMap((step, i) => (step.disabled ? [] : [toStep(step, i, study)])),
@@ -117,6 +118,16 @@ function toStep(step: StudyStep, position: number, study: Study): RecipeStep {
         dopant: step.dopant,
         concentration: step.concentration_cm3 ?? 0,
       };
+    case 'oxidation':
+      return {
+        kind: 'oxidation',
+        index,
+        ambient: step.ambient,
+        temperature: kelvin(step.temperature_C),
+        time: step.time_min * SECONDS_PER_MINUTE,
+      };
+    case 'stripOxide':
+      return { kind: 'stripOxide', index };
     case 'etch':
       return { kind: 'etch', index, thickness: step.thickness_um * CM_PER_UM };
   }

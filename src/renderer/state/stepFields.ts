@@ -95,6 +95,22 @@ export function stepFields(step: StudyStep, study: Study): FieldSpec[] {
       return epitaxyFields(step);
     case 'etch':
       return [quantity('thickness_um', 'Removed', 'um')];
+    case 'oxidation':
+      return [
+        {
+          kind: 'choice',
+          key: 'ambient',
+          label: 'Ambient',
+          options: [
+            { value: 'dry', name: 'dry oxygen' },
+            { value: 'wet', name: 'steam' },
+          ],
+        },
+        quantity('temperature_C', 'Temperature', 'C'),
+        quantity('time_min', 'Time', 'min'),
+      ];
+    case 'stripOxide':
+      return [];
     case 'table':
       return [dopant];
     case 'gaussian':

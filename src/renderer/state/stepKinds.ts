@@ -45,6 +45,18 @@ export const STEP_KINDS: Record<StudyStepKind, StepKind> = {
     caution: `Etchants, hydrofluoric acid above all, injure severely and late. ${SITE}`,
     fresh: { step: 'etch', thickness_um: 0.1 },
   },
+  oxidation: {
+    title: 'Oxidation',
+    what: 'Thermal oxide, dry or wet: consumes silicon and screens later implants',
+    caution: `Furnaces stay dangerously hot, and hydrogen for steam is explosive. ${SITE}`,
+    fresh: { step: 'oxidation', ambient: 'dry', temperature_C: 1000, time_min: 30 },
+  },
+  stripOxide: {
+    title: 'Strip oxide',
+    what: 'Takes away all oxide that the recipe has grown',
+    caution: `Hydrofluoric acid injures severely and late. ${SITE}`,
+    fresh: { step: 'stripOxide' },
+  },
   table: {
     title: 'Measured profile',
     what: 'A depth profile from a text table (SIMS, SRP, a simulation)',
@@ -74,6 +86,8 @@ export const STEP_ORDER: readonly StudyStepKind[] = [
   'predeposition',
   'epitaxy',
   'etch',
+  'oxidation',
+  'stripOxide',
   'table',
   'gaussian',
   'erfc',

@@ -22,6 +22,10 @@ export function stepSummary(step: StudyStep): string {
       return `${step.thickness_um} µm${step.dopant ? `, ${symbol(step.dopant)} ${cm3(step.concentration_cm3 ?? 0)}` : ', undoped'}`;
     case 'etch':
       return `${step.thickness_um} µm removed`;
+    case 'oxidation':
+      return `${step.ambient}, ${step.temperature_C} °C, ${step.time_min} min`;
+    case 'stripOxide':
+      return 'all grown oxide';
     case 'table':
       return `${symbol(step.dopant)}, ${step.source?.name ?? step.file ?? 'embedded'}`;
     case 'gaussian':
