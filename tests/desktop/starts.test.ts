@@ -6,6 +6,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, afterEach, beforeAll, expect, test } from 'vitest';
 import { commandLine, type Desktop, type LaunchOptions, launch } from './launch';
+import { Person } from './person';
 
 const STUDY = JSON.stringify({
   format: 'ohmstrata-study/1',
@@ -108,15 +109,20 @@ test('closing with unsaved work and Discard drops the recovery copy and ends', a
 
 test('a page that has crashed can be loaded again', async () => {
   const running = await start();
+  await new Person(running).settled();
   await running.answerQuestion(0);
-  const loaded = running.app.evaluate(
-    ({ BrowserWindow }) =>
-      new Promise((done) => {
-        const { webContents } = BrowserWindow.getAllWindows()[0];
-        webContents.once('did-finish-load', () => done(webContents.getURL()));
-        webContents.forcefullyCrashRenderer();
-      }),
-  );
-  expect(await loaded).toBe('app://bundle/index.html');
+  await running.app.evaluate(({ BrowserWindow }) => {
+    const { webContents } = BrowserWindow.getAllWindows()[0];
+    webContents.once('did-finish-load', () => {
+      (globalThis as { loadedAgain?: string }).loadedAgain = webContents.getURL();
+    });
+    // After this call has been answered, so that the test never waits across the crash.
+    setTimeout(() => webContents.forcefullyCrashRenderer(), 0);
+  });
+  await expect
+    .poll(() => running.app.evaluate(() => (globalThis as { loadedAgain?: string }).loadedAgain), {
+      timeout: 20_000,
+    })
+    .toBe('app://bundle/index.html');
   expect(await running.questions()).toHaveLength(1);
 });
