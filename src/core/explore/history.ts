@@ -16,7 +16,7 @@ export interface HistoryEntry {
   step: number;
   title: string;
   layers: HistoryLayer[];
-  /** sqrt(sum of Dt) of every dopant over the heat so far, um, by symbol: with the constant diffusivities of the set. */
+  /** sqrt(sum of Dt) of every dopant over the heat so far, um, by symbol, accepted transients included: with the constant diffusivities of the set. */
   diffusionLength_um: Record<string, number>;
 }
 
@@ -39,7 +39,7 @@ export function recipeHistory(study: Study): HistoryResult {
     const { layers, steps } = solve({ ...study, steps: study.steps.slice(0, last + 1) }).result;
     const report = steps.find(({ index }) => index === last + 1);
     for (const [name, value] of Object.entries(report?.figures ?? {})) {
-      const symbol = /^Dt_(\w+)_cm2$/.exec(name)?.[1];
+      const symbol = /^(?:Dt|transientDt)_(\w+)_cm2$/.exec(name)?.[1];
       if (symbol && typeof value === 'number') Dt.set(symbol, (Dt.get(symbol) ?? 0) + value);
     }
     return {

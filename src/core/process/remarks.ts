@@ -1,41 +1,71 @@
-/** What implants into a crystal do that neither amorphous ranges nor a constant diffusivity know: said once for a recipe. */
+/** What implants into a crystal do that neither amorphous ranges nor a constant diffusivity know: said where it bears on a recipe. */
 
 import { ZERO_CELSIUS } from '../material/constants';
-import { dopantOf } from '../material/dopants';
+import { DOPANT_FACTS, type Dopant, dopantOf } from '../material/dopants';
 import { OXIDATION_RANGE } from '../material/oxidation';
 import type { Warning } from '../study/problem';
 import type { OxidationStep, RecipeStep } from '../study/recipe';
-import { hottest } from './heat';
+import { short } from './report';
 
-/** Below this, K, damage speeds diffusion up for as long as a furnace anneal lasts. */
-const TRANSIENT_BELOW = 950 + ZERO_CELSIUS;
+const NM_PER_CM = 1e7;
 
-/**
- * Channelling and transient enhanced diffusion, both for boron and phosphorus, which travel on interstitial sites.
- * Both remarks are common knowledge of the field; temperatures from memory.
- */
+/** Channelling, for boron and phosphorus: common knowledge of the field. */
 export function implantRemarks(steps: readonly RecipeStep[]): Warning[] {
-  const isFast = (step: RecipeStep): boolean =>
-    step.kind === 'implant' && ['boron', 'phosphorus'].includes(dopantOf(step.species));
-  const first = steps.findIndex(isFast);
-  if (first < 0) return [];
-  const warnings: Warning[] = [
+  const first = steps.find(
+    (step) => step.kind === 'implant' && ['boron', 'phosphorus'].includes(dopantOf(step.species)),
+  );
+  if (!first) return [];
+  return [
     {
       code: 'amorphous-ranges',
       message:
         'implants are computed for amorphous silicon: in a crystal some boron or phosphorus channels deeper, from about a thousandth of the peak down',
-      step: steps[first].index,
+      step: first.index,
     },
   ];
-  const heat = steps.slice(first).find((step) => step.kind === 'anneal');
-  if (heat && hottest(heat) < TRANSIENT_BELOW)
-    warnings.push({
+}
+
+/**
+ * What implant damage does in the first heat after it: the estimate, offered where the step has not
+ * accepted it, and said to be an estimate where it has.
+ * @param extraDt cm^2 of each dopant that damage moves; empty without damage.
+ */
+export function transientRemarks(
+  step: RecipeStep,
+  isAccepted: boolean,
+  extraDt: ReadonlyMap<Dopant, number>,
+): Warning[] {
+  if (extraDt.size === 0)
+    return isAccepted
+      ? [
+          {
+            code: 'transient-nothing',
+            message:
+              'no implant damage can move boron or phosphorus here: neither was there, or no implant came since the last heat; the "+1" estimate adds nothing',
+            step: step.index,
+          },
+        ]
+      : [];
+  const lengths = [...extraDt].map(
+    ([dopant, Dt]) =>
+      `${DOPANT_FACTS[dopant].symbol} ${short(Number((Math.sqrt(Dt) * NM_PER_CM).toPrecision(2)))} nm`,
+  );
+  const estimate = `√Dt ${lengths.join(', ')}, the Dt within a factor of about three`;
+  if (isAccepted)
+    return [
+      {
+        code: 'transient-estimate',
+        message: `holds an estimate of transient enhanced diffusion by implant damage ("+1": ${estimate}, for doses that do not amorphise): do not release product on it`,
+        step: step.index,
+      },
+    ];
+  return [
+    {
       code: 'transient-diffusion',
-      message:
-        'implant damage can move boron and phosphorus several times further than this in an anneal below 950 °C (transient enhanced diffusion), which is not computed',
-      step: heat.index,
-    });
-  return warnings;
+      message: `implant damage moves boron and phosphorus further than this below 950 °C (transient enhanced diffusion), which is not computed; the "+1" estimate is ${estimate}${step.kind === 'anneal' ? ': the step can take it in' : ''}`,
+      step: step.index,
+    },
+  ];
 }
 
 /** What growing oxide does that is not computed, and where its rate is extrapolated. */

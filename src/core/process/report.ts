@@ -17,9 +17,10 @@ export const UM_PER_CM = 1e4;
 export function dtFigures(
   present: Iterable<Dopant>,
   DtOf: (dopant: Dopant) => number,
+  name = 'Dt',
 ): Record<string, number> {
   const figures: Record<string, number> = {};
-  for (const dopant of present) figures[`Dt_${DOPANT_FACTS[dopant].symbol}_cm2`] = DtOf(dopant);
+  for (const dopant of present) figures[`${name}_${DOPANT_FACTS[dopant].symbol}_cm2`] = DtOf(dopant);
   return figures;
 }
 

@@ -18,15 +18,15 @@ import type {
   RecipeStep,
 } from '../study/recipe';
 import { activation } from './activation';
-import { heatSolved } from './diffusion/heatSolved';
-import type { Source } from './diffusion/source';
 import { epitaxy } from './epitaxy';
 import { etch } from './etch';
-import { dtOf, type HeatTreatment, heatUp, heatWarnings, hottest } from './heat';
+import { dtOf, type HeatTreatment } from './heat';
 import { implant } from './implant';
 import { predeposition } from './predeposition';
 import { implantRemarks, oxidationWarnings } from './remarks';
 import { dtFigures, type StepReport, short, UM_PER_CM } from './report';
+import { treat } from './treat';
+import { doseIn, presentIn, report, type Wafer } from './wafer';
 
 export interface ProcessResult {
   /** The wafer's own doping first (stepIndex 0), then one for each step that brought dopant. */
@@ -43,20 +43,6 @@ export interface ProcessResult {
 
 const NM_PER_CM = 1e7;
 
-/** What has become of the wafer so far. */
-interface Wafer {
-  contributions: Contribution[];
-  /** Hottest point of the last heat treatment, K. */
-  lastHeat?: number;
-  addedSilicon: number;
-  /** Grown on the wafer and not stripped, cm. */
-  oxide: number;
-  /** Of the meshes of solved steps. */
-  refinement: number;
-  reports: StepReport[];
-  warnings: Warning[];
-}
-
 /**
  * Runs the steps in order on a wafer of uniform doping.
  * @param refinement 2 for half the cells of solved steps.
@@ -66,6 +52,7 @@ export function runRecipe(recipe: Recipe, refinement = 1): ProcessResult {
   const background = uniform(concentration, 0, Number.POSITIVE_INFINITY);
   const wafer: Wafer = {
     contributions: [{ dopant, shape: background, stepIndex: 0 }],
+    damaging: new Set(),
     addedSilicon: 0,
     oxide: 0,
     refinement,
@@ -132,6 +119,7 @@ function place(step: RecipeStep & { dopant: Dopant }, wafer: Wafer, shape: Shape
 function runImplant(step: ImplantStep, wafer: Wafer): void {
   const { dopant, shape, statistics, retainedDose, screened, warnings } = implant(step);
   wafer.contributions.push({ dopant, shape, stepIndex: step.index });
+  wafer.damaging.add(step.index);
   wafer.warnings.push(...warnings.map((warning) => ({ ...warning, step: step.index })));
   const through = step.screen
     ? ` through ${short(step.screen.thickness * 1e7)} nm of ${step.screen.material}`
@@ -229,53 +217,4 @@ function runOxidation(step: OxidationStep, wafer: Wafer, recipe: Recipe): void {
     ...dtFigures(presentIn(wafer), (dopant) => dtOf(set, dopant, heat)),
     ...solved,
   });
-}
-
-/**
- * Heats what is there. With closed forms, what arrives during the treatment has its share of it already; solved, it enters from a
- * surface that is held.
- * @returns what a solved treatment tells of itself.
- */
-function treat(
-  step: RecipeStep,
-  wafer: Wafer,
-  heat: HeatTreatment,
-  recipe: Recipe,
-  arriving: Contribution | null,
-  source: Source | null,
-): StepReport['figures'] {
-  const { diffusivity: set, diffusion } = recipe.models;
-  wafer.lastHeat = hottest(heat);
-  const remarked = arriving ? [...wafer.contributions, arriving] : wafer.contributions;
-  const warnings = heatWarnings(remarked, set, heat, step.index);
-  if (diffusion === 'constant') {
-    wafer.warnings.push(...warnings);
-    wafer.contributions = [...heatUp(wafer.contributions, set, heat), ...(arriving ? [arriving] : [])];
-    return {};
-  }
-  wafer.warnings.push(...warnings.filter(({ code }) => code !== 'extrinsic-diffusion'));
-  const { thickness, buriedOxide } = recipe.wafer;
-  const filmEnd = Math.min(thickness, buriedOxide ?? Number.POSITIVE_INFINITY) + wafer.addedSilicon;
-  const solved = heatSolved(wafer.contributions, set, heat, filmEnd, source, wafer.refinement);
-  wafer.contributions = solved.contributions;
-  return {
-    nodes: solved.nodes,
-    timeSteps: solved.steps,
-    ...(solved.doseError !== null && { doseError_ppm: solved.doseError * 1e6 }),
-  };
-}
-
-function report(step: RecipeStep, wafer: Wafer, title: string, figures: StepReport['figures']): void {
-  wafer.reports.push({ index: step.index, kind: step.kind, title, figures });
-}
-
-/** What recipe steps and the depth that is solved hold of a dopant, cm^-2; the wafer itself is endless. */
-function doseIn(wafer: Wafer, dopant: Dopant): number {
-  return wafer.contributions
-    .filter((part) => part.dopant === dopant && !(part.stepIndex === 0 && part.shape.kind === 'uniform'))
-    .reduce((sum, { shape }) => sum + doseOf(shape, Number.POSITIVE_INFINITY), 0);
-}
-
-function presentIn(wafer: Wafer): Set<Dopant> {
-  return new Set(wafer.contributions.map(({ dopant }) => dopant));
 }

@@ -66,6 +66,8 @@ export interface AnnealStep extends Numbered {
   /** Equal to `temperature` unless the step is a linear ramp. */
   readonly endTemperature: number;
   readonly time: number;
+  /** The "+1" estimate of transient enhanced diffusion is accepted. */
+  readonly hasTransient: boolean;
 }
 
 export interface EpitaxyStep extends Numbered {

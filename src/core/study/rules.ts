@@ -71,6 +71,18 @@ function stepProblems(step: StudyStep, key: string): StudyProblem[] {
               message: `found ${step.to_um}; it must be deeper than from_um ${step.from_um}`,
             },
           ];
+    case 'anneal':
+      return step.transient === undefined ||
+        step.endTemperature_C === undefined ||
+        step.endTemperature_C === step.temperature_C
+        ? []
+        : [
+            {
+              key: `${key}.transient`,
+              message:
+                'the estimate is for one temperature; leave endTemperature_C out, or put a step of constant temperature before the ramp',
+            },
+          ];
     case 'epitaxy':
       return (step.dopant === undefined) === (step.concentration_cm3 === undefined)
         ? []

@@ -128,6 +128,8 @@ const anneal = z.strictObject({
   /** Present: a linear ramp from `temperature_C` to this over `time_min`. */
   endTemperature_C: temperature.optional(),
   ambient: z.enum(['inert']).default('inert'),
+  /** Present: the extra diffusion by the damage of the implants before it, by this estimate. */
+  transient: z.enum(['plusOne']).optional(),
   ...common,
 });
 

@@ -109,6 +109,7 @@ function toStep(step: StudyStep, position: number, study: Study): RecipeStep {
         temperature: kelvin(step.temperature_C),
         endTemperature: kelvin(step.endTemperature_C ?? step.temperature_C),
         time: step.time_min * SECONDS_PER_MINUTE,
+        hasTransient: step.transient === 'plusOne',
       };
     case 'epitaxy':
       return {

@@ -83,6 +83,20 @@ export function stepFields(step: StudyStep, study: Study): FieldSpec[] {
         quantity('temperature_C', 'Temperature', 'C'),
         quantity('time_min', 'Time', 'min'),
         quantity('endTemperature_C', 'Ramp to', 'C', 'constant'),
+        {
+          kind: 'choice',
+          key: 'transient',
+          label: 'Implant damage',
+          chosen: step.transient ?? 'none',
+          options: [
+            { value: 'none', name: 'not computed' },
+            { value: 'plusOne', name: '“+1” estimate (within about 3×)' },
+          ],
+          choose: (option) => {
+            const { transient: _, ...bare } = step;
+            return option === 'plusOne' ? { ...bare, transient: option } : bare;
+          },
+        },
       ];
     case 'predeposition':
       return [
