@@ -3,7 +3,14 @@
 export { type BiasResult, type BiasSpan, biasSweep } from './explore/bias';
 export { type HistoryResult, recipeHistory } from './explore/history';
 export { type TemperatureResult, type TemperatureSpan, temperatureSweep } from './explore/temperature';
-export { DOPANT_FACTS, DOPANTS, type Dopant, IMPLANT_SPECIES, type ImplantSpecies } from './material/dopants';
+export {
+  DOPANT_FACTS,
+  DOPANTS,
+  type Dopant,
+  dopantOf,
+  IMPLANT_SPECIES,
+  type ImplantSpecies,
+} from './material/dopants';
 export { ELEMENTS } from './material/elements';
 export { concentrationOf, resistivityOf } from './material/mf723';
 export { TARGETS, type TargetName } from './material/targets';

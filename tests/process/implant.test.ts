@@ -14,6 +14,7 @@ const step = (parts: Partial<ImplantStep> = {}): ImplantStep => ({
   dose: 1e14,
   energy_keV: 80,
   shape: 'pearson',
+  hasTail: false,
   ranges: 'universal',
   ...parts,
 });

@@ -191,14 +191,16 @@ describe('remarks on implants', () => {
     dose: 1e13,
     energy_keV: 50,
     shape: 'pearson',
+    hasTail: false,
     ranges: 'universal',
   });
 
-  test('channelling is named for boron and phosphorus', () => {
-    const codes = (species: ImplantStep['species']) =>
-      implantRemarks([implanted(species)]).map(({ code }) => code);
+  test('channelling is named for boron and phosphorus, and the tail that stands in for it', () => {
+    const codes = (species: ImplantStep['species'], hasTail = false) =>
+      implantRemarks([{ ...implanted(species), hasTail }]).map(({ code }) => code);
     for (const species of ['boron', 'BF2', 'phosphorus'] as const)
       expect(codes(species)).toEqual(['amorphous-ranges']);
     expect(codes('arsenic')).toEqual([]);
+    expect(codes('boron', true)).toEqual(['channelling-tail']);
   });
 });

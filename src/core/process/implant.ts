@@ -4,6 +4,7 @@ import { type Dopant, dopantOf } from '../material/dopants';
 import { doseOf, gaussian, pearson, type Shape } from '../profile/shape';
 import type { Warning } from '../study/problem';
 import type { ImplantStep } from '../study/recipe';
+import { withTail } from './channelling';
 import { type RangeStatistics, rangeStatistics } from './ranges';
 
 export interface Implanted {
@@ -27,6 +28,8 @@ const LARGE_SCREEN_LOSS = 0.3;
  * What lies at x < 0 is lost, and the dose left in the silicon reported: the moments are those of an unbounded medium, in
  * which these ions have gone back through the surface, while the dose of a step is what the implanter counted on its way
  * in. (Boron at 10 keV loses 2 %, heavier ions less than 0.5 %.)
+ *
+ * With a tail, that is put on last, see `withTail`.
  *
  * Through a screen: the ions that pass are those whose range in the screen's own material exceeds its thickness t; they lie
  * in the silicon as the silicon profile shifted up by t Rp_silicon/Rp_screen, scaled to the dose that passed.
@@ -60,6 +63,7 @@ export function implant(step: ImplantStep): Implanted {
         message: `${(100 * screened).toFixed(0)} % of the ${species} stays in the screen ${screen.material}: what reaches the silicon is uncertain, because range scaling is checked only while less than 30 % stays`,
       });
   }
+  if (step.hasTail) shape = withTail(shape);
   return {
     dopant: dopantOf(species),
     shape,

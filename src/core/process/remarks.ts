@@ -4,24 +4,40 @@ import { ZERO_CELSIUS } from '../material/constants';
 import { DOPANT_FACTS, type Dopant, dopantOf } from '../material/dopants';
 import { OXIDATION_RANGE } from '../material/oxidation';
 import type { Warning } from '../study/problem';
-import type { OxidationStep, RecipeStep } from '../study/recipe';
+import type { ImplantStep, OxidationStep, RecipeStep } from '../study/recipe';
+import { BORON_TAIL } from './channelling';
 import { short } from './report';
 
 const NM_PER_CM = 1e7;
 
-/** Channelling, for boron and phosphorus: common knowledge of the field. */
+/** Channelling, for boron and phosphorus (common knowledge of the field), and what stands in for it: each said once. */
 export function implantRemarks(steps: readonly RecipeStep[]): Warning[] {
-  const first = steps.find(
-    (step) => step.kind === 'implant' && ['boron', 'phosphorus'].includes(dopantOf(step.species)),
+  const implants = steps.filter(
+    (step): step is ImplantStep =>
+      step.kind === 'implant' && ['boron', 'phosphorus'].includes(dopantOf(step.species)),
   );
-  if (!first) return [];
+  const bare = implants.find((step) => !step.hasTail);
+  const tailed = implants.find((step) => step.hasTail);
   return [
-    {
-      code: 'amorphous-ranges',
-      message:
-        'implants are computed for amorphous silicon: in a crystal some boron or phosphorus channels deeper, from about a thousandth of the peak down',
-      step: first.index,
-    },
+    ...(bare
+      ? [
+          {
+            code: 'amorphous-ranges',
+            message:
+              'implants are computed for amorphous silicon: in a crystal some boron or phosphorus channels deeper, from about a thousandth of the peak down',
+            step: bare.index,
+          },
+        ]
+      : []),
+    ...(tailed
+      ? [
+          {
+            code: 'channelling-tail',
+            message: `an exponential tail with one decay length (${short(BORON_TAIL * NM_PER_CM)} nm) stands in for channelling: the real one hangs on tilt, twist, screen and dose`,
+            step: tailed.index,
+          },
+        ]
+      : []),
   ];
 }
 

@@ -49,6 +49,8 @@ export interface ImplantStep extends Numbered {
   readonly energy_keV: number;
   readonly screen?: { readonly material: 'oxide' | 'nitride'; readonly thickness: number };
   readonly shape: 'pearson' | 'gaussian';
+  /** An exponential tail for channelling, boron alone. */
+  readonly hasTail: boolean;
   readonly ranges: RangeSet;
 }
 

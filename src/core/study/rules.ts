@@ -1,5 +1,6 @@
 /** What one key demands of another: rules that no single field can check. */
 
+import { dopantOf } from '../material/dopants';
 import type { StudyProblem } from './problem';
 import type { Study, StudyStep } from './schema';
 
@@ -69,6 +70,15 @@ function stepProblems(step: StudyStep, key: string): StudyProblem[] {
             {
               key: `${key}.to_um`,
               message: `found ${step.to_um}; it must be deeper than from_um ${step.from_um}`,
+            },
+          ];
+    case 'implant':
+      return step.tail === undefined || dopantOf(step.dopant) === 'boron'
+        ? []
+        : [
+            {
+              key: `${key}.tail`,
+              message: `a tail is published for boron alone; leave it out for ${step.dopant}`,
             },
           ];
     case 'anneal':

@@ -106,6 +106,8 @@ const implant = z.strictObject({
     .strictObject({ material: z.enum(['oxide', 'nitride']), thickness_nm: between(0, 1e4) })
     .optional(),
   shape: z.enum(['pearson', 'gaussian']).default('pearson'),
+  /** Boron alone: in place of the channelling that ranges in an amorphous target leave out. */
+  tail: z.enum(['exponential']).optional(),
   /** Overrides `models.ranges` for this step. */
   ranges: z.enum(RANGE_SETS).optional(),
   ...common,

@@ -91,6 +91,7 @@ function toStep(step: StudyStep, position: number, study: Study): RecipeStep {
           thickness: step.screen.thickness_nm * CM_PER_NM,
         },
         shape: step.shape,
+        hasTail: step.tail === 'exponential',
         ranges: step.ranges ?? study.models.ranges,
       };
     case 'predeposition':

@@ -4,6 +4,7 @@ import {
   DIFFUSIVITY_SETS,
   DOPANT_FACTS,
   DOPANTS,
+  dopantOf,
   IMPLANT_SPECIES,
   RANGE_SETS,
   type Study,
@@ -161,7 +162,17 @@ function implantFields(step: Extract<StudyStep, { step: 'implant' }>, study: Stu
     return option === 'study' ? rest : { ...rest, ranges: option as (typeof RANGE_SETS)[number] };
   };
   return [
-    { kind: 'choice', key: 'dopant', label: 'Species', options: SPECIES_OPTIONS },
+    {
+      kind: 'choice',
+      key: 'dopant',
+      label: 'Species',
+      options: SPECIES_OPTIONS,
+      choose: (option) => {
+        const { tail, ...bare } = step;
+        const dopant = option as typeof step.dopant;
+        return tail && dopantOf(dopant) === 'boron' ? { ...bare, dopant, tail } : { ...bare, dopant };
+      },
+    },
     quantity('dose_cm2', 'Dose', 'cm-2'),
     quantity('energy_keV', 'Energy', 'keV'),
     {
@@ -186,6 +197,7 @@ function implantFields(step: Extract<StudyStep, { step: 'implant' }>, study: Stu
         { value: 'gaussian', name: 'Gaussian' },
       ],
     },
+    ...(dopantOf(step.dopant) === 'boron' ? [tailField(step)] : []),
     {
       kind: 'choice',
       key: 'ranges',
@@ -198,6 +210,23 @@ function implantFields(step: Extract<StudyStep, { step: 'implant' }>, study: Stu
       choose: chooseRanges,
     },
   ];
+}
+
+function tailField(step: Extract<StudyStep, { step: 'implant' }>): ChoiceSpec {
+  return {
+    kind: 'choice',
+    key: 'tail',
+    label: 'Channelling',
+    chosen: step.tail ?? 'none',
+    options: [
+      { value: 'none', name: 'not computed' },
+      { value: 'exponential', name: 'exponential tail, 45 nm' },
+    ],
+    choose: (option) => {
+      const { tail: _, ...bare } = step;
+      return option === 'exponential' ? { ...bare, tail: option } : bare;
+    },
+  };
 }
 
 function epitaxyFields(step: Extract<StudyStep, { step: 'epitaxy' }>): FieldSpec[] {
