@@ -39,17 +39,23 @@ describe('an abrupt junction', () => {
     expect(potential[potential.length - 1] - potential[0]).toBeCloseTo(builtIn, 6);
   });
 
-  test.each([5, 10, 20])('at %i V reverse is depleted as the depletion approximation says', (reverse) => {
-    // Width sqrt(2 eps (Vbi + V - 2kT/q)(1/Na + 1/Nd)/q): the correction by 2kT/q is S. M. Sze's (from memory); what is left of
-    // it is of the order of the built-in voltage's share of kT/q.
-    const { junctions } = electrical(abrupt(acceptors, donors), { reverseBias: [reverse] });
-    const across = builtIn + reverse - 2 * volt;
-    const width = Math.sqrt(((2 * PERMITTIVITY * across) / ELEMENTARY_CHARGE) * (1 / acceptors + 1 / donors));
-    const [upper, lower] = junctions[0].depletion;
-    expect((lower - upper) / width).toBeCloseTo(1, 4);
-    expect((UM - upper) / (lower - UM)).toBeCloseTo(donors / acceptors, 3);
-    expect(junctions[0].capacitance / (PERMITTIVITY / width)).toBeCloseTo(1, 4);
-  });
+  // From some 40 V on there are places where neither carrier is left, not even as the smallest floating-point number.
+  test.each([5, 10, 20, 100, 400])(
+    'at %i V reverse is depleted as the depletion approximation says',
+    (reverse) => {
+      // Width sqrt(2 eps (Vbi + V - 2kT/q)(1/Na + 1/Nd)/q): the correction by 2kT/q is S. M. Sze's (from memory); what is left of
+      // it is of the order of the built-in voltage's share of kT/q.
+      const { junctions } = electrical(abrupt(acceptors, donors), { reverseBias: [reverse] });
+      const across = builtIn + reverse - 2 * volt;
+      const width = Math.sqrt(
+        ((2 * PERMITTIVITY * across) / ELEMENTARY_CHARGE) * (1 / acceptors + 1 / donors),
+      );
+      const [upper, lower] = junctions[0].depletion;
+      expect((lower - upper) / width).toBeCloseTo(1, 4);
+      expect((UM - upper) / (lower - UM)).toBeCloseTo(donors / acceptors, 3);
+      expect(junctions[0].capacitance / (PERMITTIVITY / width)).toBeCloseTo(1, 4);
+    },
+  );
 
   test('its capacitance is the change of its charge with voltage', () => {
     const at = (reverse: number) => choice({ reverseBias: [reverse] });
@@ -227,6 +233,18 @@ describe('bias', () => {
     expect(biased).toEqual(still);
   });
 
+  test('of 70 V and a changed temperature start from the potential found before', () => {
+    const doping = abrupt(2e17, 1e16);
+    const biased = choice({ reverseBias: [70] });
+    const warmer = choice({ reverseBias: [70], temperature: ROOM + 2 });
+    const near = equilibriumNear(equilibrium(doping, biased), warmer);
+    const afresh = equilibrium(doping, warmer);
+    expect(near.electrostatics?.junctions[0].capacitance).toBeCloseTo(
+      afresh.electrostatics?.junctions[0].capacitance ?? 0,
+      14,
+    );
+  });
+
   test('pinches a layer until nothing of it is left', () => {
     const pinched = dopingOf(() => 1e16, box(3e16, UM, 1.6 * UM), 20 * UM, [], 1, [UM, 1.6 * UM]);
     const sheet = (reverse: number) => {
@@ -239,5 +257,21 @@ describe('bias', () => {
     for (let k = 1; k < conductances.length; k++)
       expect(conductances[k]).toBeLessThanOrEqual(conductances[k - 1]);
     expect(conductances[4]).toBeLessThan(1e-6 * conductances[0]);
+  });
+});
+
+test('the neutral potential is found where net doping is lost in rounding and a bias has taken the carriers', () => {
+  const acceptors = Float64Array.from({ length: 400 }, (_, i) => 1e18 + 1e15 * i);
+  const donors = acceptors.map((value, i) => value + 128 * ((i % 9) - 4));
+  const dopants = [
+    { dopant: 'phosphorus', active: donors },
+    { dopant: 'boron', active: acceptors },
+  ] as const;
+  const charges = new ChargeModel({ dopants, donors, acceptors }, choice({ ionisation: 'levels' }));
+  charges.electronLevel.fill(700);
+  charges.noteBias();
+  charges.neutralPotential(new Float64Array(donors.length), 1e-10);
+  charges.charge.forEach((charge, i) => {
+    expect(Math.abs(charge)).toBeLessThan(1e-15 * (donors[i] + acceptors[i]));
   });
 });

@@ -29,8 +29,11 @@ export interface ActiveColumns {
   readonly acceptors: Float64Array;
 }
 
-/** Steps below this (kT/q) may be nothing but rounding. */
-const ROUNDING = 1e-4;
+/** Charge below this part of all carriers and dopants may be nothing but rounding. */
+const ROUNDING = 4 * Number.EPSILON;
+const MOST_ROUNDS = 200;
+/** Carriers below this, cm^-3, are told by their Fermi level: the next floating-point numbers lose digits, then there are none. */
+const FEWEST = 1e-250;
 
 interface LevelColumn {
   readonly dopant: Dopant;
@@ -147,16 +150,25 @@ export class ChargeModel {
   }
 
   /**
-   * A Newton step of node i at the last evaluated potential, held back where it would make carriers grow out of all proportion:
-   * free until those it raises reach the density of everything charged there, logarithmic beyond. Short steps are left alone to
-   * second order, so that convergence stays quadratic.
+   * A Newton step of node i from the last evaluated potential u, held back where it would make carriers grow out of all
+   * proportion: free until those it raises reach the density of everything charged there, logarithmic beyond. Short steps are left
+   * alone to second order, so that convergence stays quadratic.
    */
-  heldBack(step: number, i: number): number {
+  heldBack(step: number, u: number, i: number): number {
     const length = Math.abs(step);
     const raised = step > 0 ? this.electrons[i] : this.holes[i];
     const all = this.electrons[i] + this.holes[i] + this.#doping.donors[i] + this.#doping.acceptors[i];
-    const free = Math.log(all / raised);
+    const free =
+      raised > FEWEST
+        ? Math.log(all / raised)
+        : Math.log(all / this.intrinsic[i]) - (step > 0 ? u - this.electronLevel[i] : this.holeLevel[i] - u);
     return length <= free ? step : Math.sign(step) * (free + Math.log1p(length - free));
+  }
+
+  /** ln(n/p) of node i at the last evaluated potential u; by their Fermi levels where either is too few to be counted. */
+  logRatio(u: number, i: number): number {
+    const [n, p] = [this.electrons[i], this.holes[i]];
+    return n > FEWEST && p > FEWEST ? Math.log(n / p) : 2 * u - this.electronLevel[i] - this.holeLevel[i];
   }
 
   /** Ionised concentration of every dopant at the last evaluated potential, in the order of the doping. */
@@ -173,7 +185,9 @@ export class ChargeModel {
 
   /**
    * Fills `u` with the potential at which every node is neutral by itself, and evaluates there. Ends when no step is longer than
-   * `tolerance` (kT/q) or rounding keeps steps from getting shorter, as where donors and acceptors almost cancel.
+   * `tolerance` (kT/q); a node is neutral, too, when its charge is lost in the rounding of what it consists of, as where donors
+   * and acceptors almost cancel and a bias has taken the carriers away.
+   * @throws Error when the iteration does not end, which would be a defect.
    */
   neutralPotential(u: Float64Array, tolerance: number): void {
     const { donors, acceptors } = this.#doping;
@@ -182,19 +196,21 @@ export class ChargeModel {
       u[i] =
         (net >= 0 ? this.electronLevel[i] : this.holeLevel[i]) + Math.asinh(net / (2 * this.intrinsic[i]));
     }
-    let before = Number.POSITIVE_INFINITY;
-    for (;;) {
+    for (let round = 0; round < MOST_ROUNDS; round++) {
       this.evaluate(u);
       let largest = 0;
       for (let i = 0; i < u.length; i++) {
-        const step = this.charge[i] / this.response[i];
-        u[i] += this.heldBack(step, i);
+        const all = this.electrons[i] + this.holes[i] + donors[i] + acceptors[i];
+        if (Math.abs(this.charge[i]) <= ROUNDING * all) continue;
+        const step = this.heldBack(this.charge[i] / this.response[i], u[i], i);
+        u[i] += step;
         largest = Math.max(largest, Math.abs(step));
       }
-      const isStalled = largest < ROUNDING && largest > before / 2;
-      if (largest < tolerance || isStalled) break;
-      before = largest;
+      if (largest < tolerance) {
+        this.evaluate(u);
+        return;
+      }
     }
-    this.evaluate(u);
+    throw new Error('the neutral potential did not converge');
   }
 }

@@ -58,7 +58,7 @@ export function equilibriumNear(state: CarrierState, choice: EquilibriumChoice):
   const potential = state.electrostatics?.potential;
   if (!potential) throw new Error('the state has no potential to start from');
   const { depth } = state.doping;
-  const scale = 1 / thermalVoltage(state.temperature);
+  const scale = 1 / thermalVoltage(choice.temperature);
   const found = solveNodes(state.doping, choice, { depth, potential: potential.map((v) => v * scale) });
   return stateOf(
     found,

@@ -10,24 +10,25 @@ import type { ElectricalJunction } from './state';
 interface Found {
   readonly doping: SampledDoping;
   readonly depth: Float64Array;
-  readonly electrons: Float64Array;
-  readonly holes: Float64Array;
+  /** kT/q */
+  readonly potential: Float64Array;
   readonly intrinsic: Float64Array;
+  /** Evaluated at the potential. */
+  readonly charges: ChargeModel;
 }
 
 /** With what is needed to ask how it answers a small change. */
 interface Solved extends Found {
   readonly system: PoissonSystem;
-  readonly charges: ChargeModel;
 }
 
 /** Two cell ends may come as close as this, cm. */
 const CLOSEST = 1e-11;
 
 /** Depths where n = p, cm: ln(n/p) is smooth through a junction, so that the parabola of its cell gives the root. */
-export function crossings({ depth, electrons, holes }: Found): number[] {
+export function crossings({ depth, potential, charges }: Found): number[] {
   const found: number[] = [];
-  const ratio = (i: number) => Math.log(electrons[i] / holes[i]);
+  const ratio = (i: number) => charges.logRatio(potential[i], i);
   for (let i = 0; i + 2 < depth.length; i += 2) {
     const [a, b, c] = [ratio(i), ratio(i + 1), ratio(i + 2)];
     if (a === 0 && i > 0) found.push(depth[i]);
@@ -65,11 +66,12 @@ export function electricalJunctions(
   cuts: readonly number[],
   volt: number,
 ): ElectricalJunction[] {
-  const { depth, doping, electrons, holes } = found;
+  const { depth, doping, charges, potential } = found;
+  const isNAt = (i: number): boolean => charges.logRatio(potential[i], i) > 0;
   const bounds = [0, ...cuts, depth.length - 1];
   const free = new Set(doping.junctions.map((_, k) => k));
   return cuts.map((cut, k) => {
-    const isN = [electrons[bounds[k] + 1] > holes[bounds[k] + 1], electrons[cut + 1] > holes[cut + 1]];
+    const isN = [isNAt(bounds[k] + 1), isNAt(cut + 1)];
     const { edges, capacitance } = smallSignal(found, cut, bounds[k], bounds[k + 2], isN[0], volt);
     const metallurgical = match(doping, depth[cut], isN[1], free);
     if (metallurgical !== null) free.delete(metallurgical);

@@ -119,7 +119,7 @@ export function solvePoisson(
     for (let i = 0; i < u.length; i++) {
       const length = Math.abs(step[i]);
       if (length > largest) largest = length;
-      u[i] += charge.heldBack(step[i], i);
+      u[i] += charge.heldBack(step[i], u[i], i);
     }
     if (largest < SHORTEST_STEP) {
       charge.evaluate(u);
