@@ -66,6 +66,26 @@ const GALLERY: Record<string, Study> = {
       { step: 'gaussian', dopant: 'boron', peak_cm3: 1e17, depth_um: 0.5, sigma_um: 0.05 },
     ],
   }),
+  'a steep tail on a broad profile': study({
+    wafer: { dopant: 'arsenic', concentration_cm3: 5.8e15 },
+    temperature_C: 85,
+    steps: [
+      { step: 'uniform', dopant: 'boron', concentration_cm3: 2.8e18, to_um: 0.0622 },
+      { step: 'anneal', temperature_C: 846.6, time_min: 4.7 },
+      { step: 'gaussian', dopant: 'boron', peak_cm3: 8e14, depth_um: -0.127, sigma_um: 0.846 },
+    ],
+  }),
+  'carriers spilt into a light wafer': study({
+    wafer: { dopant: 'boron', concentration_cm3: 1.28e15 },
+    steps: [
+      { step: 'predeposition', dopant: 'phosphorus', temperature_C: 852.3, time_min: 2.88 },
+      { step: 'etch', thickness_um: 0.00184 },
+    ],
+  }),
+  'a layer on more of its own type': study({
+    wafer: { dopant: 'arsenic', concentration_cm3: 4.1e16 },
+    steps: [{ step: 'gaussian', dopant: 'phosphorus', peak_cm3: 4.5e17, depth_um: 0.988, sigma_um: 0.192 }],
+  }),
   'film on oxide': study({
     wafer: { dopant: 'boron', concentration_cm3: 1e15, buriedOxide_um: 0.2 },
     steps: [{ step: 'implant', dopant: 'phosphorus', dose_cm2: 1e13, energy_keV: 40 }, anneal],

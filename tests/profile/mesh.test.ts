@@ -75,6 +75,38 @@ describe('buildMesh', () => {
     expect(fine.nodes[fine.junctions[0]].depth).toBeCloseTo(mesh.nodes[mesh.junctions[0]].depth, 11);
   });
 
+  test('lets no tail have the weight of a wide cell', () => {
+    // Same type: what lies above the background ends in the first micrometre of 525.
+    const added = (depth: number) => 4.5e17 * Math.exp(-(((depth - UM) / (0.19 * UM)) ** 2) / 2);
+    const sum = (depth: number) => {
+      const donors = 4.1e16 + added(depth);
+      return { net: donors, total: donors, doping: Float64Array.of(donors) };
+    };
+    for (const marks of [[], [0.62 * UM, 0.81 * UM, UM, 1.19 * UM, 1.38 * UM, 1.76 * UM]]) {
+      const made = buildMesh({ end: 525 * UM, marks: [UM, ...marks], jumps: [], sample: sum, refinement: 1 });
+      const x = column(made, (node) => node.depth);
+      const dose = integrate(
+        x,
+        column(made, (node) => node.net),
+        0,
+        x.length - 1,
+      );
+      const exact = 4.1e16 * 525 * UM + 4.5e17 * 0.19 * UM * Math.sqrt(2 * Math.PI);
+      expect(Math.abs(dose / exact - 1)).toBeLessThan(1e-6);
+    }
+  });
+
+  test('has no cell more than four times as wide as its neighbour, but for splinters beside a junction', () => {
+    const x = column(mesh, (node) => node.depth);
+    const width = (end: number) => x[end + 2] - x[end];
+    const cut = mesh.junctions[0];
+    for (let end = 0; end + 4 < x.length; end += 2) {
+      if (Math.abs(end + 2 - cut) <= 4) continue;
+      const ratio = width(end + 2) / width(end);
+      expect(Math.max(ratio, 1 / ratio)).toBeLessThan(4 * (1 + 1e-9));
+    }
+  });
+
   test('resolves net doping that nearly cancels', () => {
     const compensated = (depth: number) => {
       const acceptors = 1e17 * (1 - 0.001 * Math.sin((depth / UM) * 6 * Math.PI) ** 2);

@@ -14,9 +14,14 @@ const FINEST = 1;
 const POTENTIAL_CHANGE = 0.5;
 /** Width of a cell that is not neutral, in Debye lengths of its carriers. */
 const WIDEST = 2;
-/** Carriers below this part of the doping beside them conduct nothing worth resolving, except where n = p is to be found. */
+/**
+ * Debye length, cm, beyond which cells get smaller by its fourth root: a junction so soft moves far for a small error of the
+ * potential, and that falls with the fourth power of the width. In nearly intrinsic silicon the potential itself is small.
+ */
+const SOFT = 5e-6;
+/** Carriers below this part of the net doping beside them conduct nothing worth resolving, except where n = p is to be found. */
 const NEGLIGIBLE = 1e-6;
-/** Charge below this part of the doping counts as neutral. */
+/** Charge below this part of the net doping counts as neutral. */
 const NEUTRAL = 1e-3;
 /** A cell is cut into at most so many at once: the first potential on coarse cells is only a guide. */
 const MOST_PIECES = 6;
@@ -100,6 +105,7 @@ export interface Resolved {
   readonly potential: Float64Array;
   readonly electrons: Float64Array;
   readonly holes: Float64Array;
+  readonly intrinsic: Float64Array;
   readonly charge: Float64Array;
   readonly donors: Float64Array;
   readonly acceptors: Float64Array;
@@ -123,20 +129,22 @@ function piecesOf(found: Resolved, i: number, refinement: number): number {
   if (width <= NARROWEST) return 1;
   let carriers = 0;
   let charge = 0;
-  let doping = 0;
+  let net = 0;
   for (let k = i; k <= i + 2; k++) {
     carriers = Math.max(carriers, electrons[k], holes[k]);
     charge = Math.max(charge, Math.abs(found.charge[k]));
-    doping = Math.max(doping, found.donors[k] + found.acceptors[k]);
+    net = Math.max(net, Math.abs(found.donors[k] - found.acceptors[k]));
   }
   const holdsJunction = electrons[i] > holes[i] !== electrons[i + 2] > holes[i + 2];
-  const matters = carriers >= NEGLIGIBLE * doping && charge >= NEUTRAL * doping;
+  const matters = carriers >= NEGLIGIBLE * net && charge >= NEUTRAL * net;
   if (!holdsJunction && !matters) return 1;
   const change = Math.max(
     Math.abs(potential[i + 1] - potential[i]),
     Math.abs(potential[i + 2] - potential[i + 1]),
   );
   const widths = matters ? width / (WIDEST * debyeLength(carriers, temperature)) : 0;
-  const wanted = refinement * Math.max(change / POTENTIAL_CHANGE, widths);
+  const reach = debyeLength(Math.max(net, carriers), temperature) * Math.max(1, found.intrinsic[i + 1] / net);
+  const softness = Math.max(1, Math.sqrt(Math.sqrt(reach / SOFT)));
+  const wanted = refinement * softness * Math.max(change / POTENTIAL_CHANGE, widths);
   return Math.max(1, Math.min(MOST_PIECES, Math.ceil(wanted - 1e-9)));
 }

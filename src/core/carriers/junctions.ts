@@ -1,6 +1,7 @@
 /** Junctions as the carriers see them: where n = p, how far the depletion reaches, and which sign change of doping they belong to. */
 
 import { ELEMENTARY_CHARGE } from '../material/constants';
+import { PERMITTIVITY, thermalVoltage } from '../material/silicon';
 import { intervalOf } from '../numeric/interval';
 import type { SampledDoping } from '../profile/doping';
 import type { ChargeModel } from './charge';
@@ -9,6 +10,8 @@ import type { ElectricalJunction } from './state';
 
 interface Found {
   readonly doping: SampledDoping;
+  /** K */
+  readonly temperature: number;
   readonly depth: Float64Array;
   /** kT/q */
   readonly potential: Float64Array;
@@ -25,36 +28,49 @@ interface Solved extends Found {
 /** Two cell ends may come as close as this, cm. */
 const CLOSEST = 1e-11;
 
-/** Depths where n = p, cm: ln(n/p) is smooth through a junction, so that the parabola of its cell gives the root. */
-export function crossings({ depth, potential, charges }: Found): number[] {
+/** Depths where n = p, cm. */
+export function crossings({ depth, potential, charges, temperature }: Found): number[] {
   const found: number[] = [];
+  const { charge } = charges;
+  const perField = ELEMENTARY_CHARGE / (PERMITTIVITY * thermalVoltage(temperature));
   const ratio = (i: number) => charges.logRatio(potential[i], i);
   for (let i = 0; i + 2 < depth.length; i += 2) {
-    const [a, b, c] = [ratio(i), ratio(i + 1), ratio(i + 2)];
-    if (a === 0 && i > 0) found.push(depth[i]);
-    for (const [low, high, from] of [
-      [a, b, 0],
-      [b, c, 0.5],
-    ])
-      if (low * high < 0 || (high === 0 && from === 0)) {
-        const t = rootOfParabola(a, b, c, from, from + 0.5);
-        found.push(nearestEnd(depth[i] + t * (depth[i + 2] - depth[i]), depth[i], depth[i + 2]));
-      }
+    if (i > 0 && ratio(i) === 0) found.push(depth[i]);
+    for (const half of [0, 1] as const) {
+      const [low, high] = [ratio(i + half), ratio(i + half + 1)];
+      if (!(low * high < 0 || (high === 0 && half === 0))) continue;
+      const width = depth[i + 2] - depth[i];
+      const density = [charge[i], charge[i + 1], charge[i + 2]];
+      const t = rootInHalf(low, high, density, 2 * perField * width * width, half / 2);
+      found.push(nearestEnd(depth[i] + t * width, depth[i], depth[i + 2]));
+    }
   }
   return found.filter((x) => x > 0 && x < depth[depth.length - 1]);
 }
 
-/** Root between `from` and `to` of the parabola through (0, a), (1/2, b), (1, c), by bisection: it changes sign there. */
-function rootOfParabola(a: number, b: number, c: number, from: number, to: number): number {
-  const at = (t: number) => a + t * (4 * b - 3 * a - c + t * 2 * (a + c - 2 * b));
-  let [low, high] = [from, to];
-  const isRising = at(high) > at(low);
+/**
+ * Where ln(n/p), `low` and `high` at the ends of a half of the cell, is zero: it bends as twice the potential does by the charge,
+ * a parabola through the cell's nodes. Depths in cell widths; by bisection, since it changes sign.
+ */
+function rootInHalf(
+  low: number,
+  high: number,
+  [a, b, c]: readonly number[],
+  bend: number,
+  from: number,
+): number {
+  const [slope, curve] = [4 * b - 3 * a - c, 2 * (a + c - 2 * b)];
+  const bent = (t: number): number => -bend * t * t * (a / 2 + t * (slope / 6 + t * (curve / 12)));
+  const to = from + 0.5;
+  const tilt = 2 * (high - low - bent(to) + bent(from));
+  const at = (t: number): number => low + (t - from) * tilt + bent(t) - bent(from);
+  let [start, end] = [from, to];
   for (let round = 0; round < 50; round++) {
-    const middle = (low + high) / 2;
-    if (at(middle) > 0 === isRising) high = middle;
-    else low = middle;
+    const middle = (start + end) / 2;
+    if (at(middle) > 0 === high > 0) end = middle;
+    else start = middle;
   }
-  return (low + high) / 2;
+  return (start + end) / 2;
 }
 
 const nearestEnd = (x: number, from: number, to: number): number =>

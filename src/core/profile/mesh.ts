@@ -4,7 +4,8 @@
  * Nodes come in cells of three, (left, middle, right) with the middle exactly half-way, so that Simpson's rule applies
  * to every cell and every layer boundary is the end of a cell. A cell is halved until the logarithm of all doping is
  * nearly straight in it and the net doping nearly linear on its own scale; where the net doping changes sign the cell
- * is cut at the root.
+ * is cut at the root. Three nodes see nothing of a tail that ends near the edge of a wide cell; so a cell is not much wider than
+ * its neighbours.
  */
 
 import { brent } from '../numeric/brent';
@@ -54,48 +55,100 @@ const LOG_CHANGE = 0.3;
 const LOG_BEND = 4e-3;
 /** Largest bend of the net doping at the middle, relative to the largest net doping of the cell. */
 const NET_BEND = 0.02;
+/**
+ * Where doping changes by less than so many times its bend, a cell holds the end of a tail (change and bend are 2 to 1) or a top:
+ * what happens in a part of it has the weight of a whole node. There the bend must be smaller.
+ */
+const TAIL = 8;
+const TAIL_BEND = 4e-4;
+/** A cell is at most this many times as wide as its neighbours. */
+const GROWTH = 4;
+
+interface Cell {
+  readonly left: MeshNode;
+  readonly middle: MeshNode;
+  readonly right: MeshNode;
+  /** Width it would have without the cut at a junction, which may leave a splinter; cm. */
+  readonly scale: number;
+  readonly endsAtJunction: boolean;
+}
 
 /** Builds the mesh from the surface to `end`. */
 export function buildMesh({ end, marks, jumps, sample, refinement }: MeshRequest): Mesh {
   const at = (depth: number): MeshNode => ({ depth, ...sample(depth) });
-  const mesh: Mesh = { nodes: [], junctions: [] };
   const bend = refinement * refinement;
+  const isStraight = (change: number, middleBend: number, largest: number): boolean => {
+    const size = Math.abs(middleBend);
+    return size * bend <= (Math.abs(change) < TAIL * size ? TAIL_BEND : largest);
+  };
   const fits = (left: MeshNode, middle: MeshNode, right: MeshNode): boolean => {
     const change = Math.log(right.total / left.total);
     const logBend = Math.log((middle.total * middle.total) / (left.total * right.total)) / 2;
     const scale = Math.max(Math.abs(left.net), Math.abs(middle.net), Math.abs(right.net));
+    const netBend = middle.net - (left.net + right.net) / 2;
     return (
       Math.abs(change) * refinement <= LOG_CHANGE &&
-      Math.abs(logBend) * bend <= LOG_BEND &&
-      Math.abs(middle.net - (left.net + right.net) / 2) * bend <= NET_BEND * scale
+      isStraight(change, logBend, LOG_BEND) &&
+      isStraight((right.net - left.net) / scale, netBend / scale, NET_BEND)
     );
   };
 
-  const cover = (left: MeshNode, right: MeshNode): void => {
+  /** Appends to `cells` what covers the depths between two nodes. */
+  const cover = (
+    left: MeshNode,
+    right: MeshNode,
+    scale: number,
+    endsAtJunction: boolean,
+    cells: Cell[],
+  ): void => {
     const middle = at((left.depth + right.depth) / 2);
     if (changesSign(left, right) || changesSign(left, middle)) {
       const [from, to] = changesSign(left, middle) ? [left, middle] : [left, right];
       const depth = brent((x) => sample(x).net, from.depth, to.depth, JUNCTION_TOLERANCE);
       if (depth > left.depth && depth < right.depth) {
         const junction = { ...at(depth), net: 0 };
-        cover(left, junction);
-        mesh.junctions.push(mesh.nodes.length);
-        cover(junction, right);
+        cover(left, junction, scale, true, cells);
+        cover(junction, right, scale, endsAtJunction, cells);
         return;
       }
     }
     if (right.depth - left.depth <= NARROWEST_CELL || fits(left, middle, right)) {
-      mesh.nodes.push(left, middle);
+      cells.push({ left, middle, right, scale, endsAtJunction });
       return;
     }
-    cover(left, middle);
-    cover(middle, right);
+    cover(left, middle, scale / 2, false, cells);
+    cover(middle, right, scale / 2, endsAtJunction, cells);
+  };
+
+  /** The cells with those halved that are too wide for their neighbours; the same list when there are none. */
+  const graded = (cells: readonly Cell[]): readonly Cell[] => {
+    const scaleOf = (cell: Cell | undefined): number =>
+      cell && cell.scale > NARROWEST_CELL ? cell.scale : Number.POSITIVE_INFINITY;
+    const finer: Cell[] = [];
+    let isGraded = true;
+    cells.forEach((cell, i) => {
+      const { left, middle, right, scale, endsAtJunction } = cell;
+      const widest = GROWTH * Math.min(scaleOf(cells[i - 1]), scaleOf(cells[i + 1]));
+      if (scale > widest) isGraded = false;
+      if (scale <= widest) finer.push(cell);
+      else if (right.depth - left.depth <= widest) finer.push({ ...cell, scale: widest });
+      else {
+        cover(left, middle, scale / 2, false, finer);
+        cover(middle, right, scale / 2, endsAtJunction, finer);
+      }
+    });
+    return isGraded ? cells : graded(finer);
   };
 
   const ends = cellEnds(end, marks, jumps).map(at);
-  for (let i = 1; i < ends.length; i++) cover(ends[i - 1], ends[i]);
-  mesh.nodes.push(ends[ends.length - 1]);
-  return mesh;
+  const covering: Cell[] = [];
+  for (let i = 1; i < ends.length; i++)
+    cover(ends[i - 1], ends[i], ends[i].depth - ends[i - 1].depth, false, covering);
+  const cells = graded(covering);
+  return {
+    nodes: [...cells.flatMap(({ left, middle }) => [left, middle]), cells[cells.length - 1].right],
+    junctions: cells.flatMap(({ endsAtJunction }, i) => (endsAtJunction ? [2 * i + 2] : [])),
+  };
 }
 
 function changesSign(a: MeshNode, b: MeshNode): boolean {
