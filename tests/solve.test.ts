@@ -5,6 +5,7 @@ import { intrinsicDensity } from '../src/core/material/intrinsic';
 import { resistivityOf } from '../src/core/material/mf723';
 import { mobilityModel } from '../src/core/mobility/list';
 import { uniformSilicon } from '../src/core/mobility/uniform';
+import type { Solution } from '../src/core/result';
 import { type SolveOptions, solve } from '../src/core/solve';
 import type { Study } from '../src/core/study/schema';
 import { integrate } from './support/quadrature';
@@ -321,29 +322,70 @@ describe('no recipe whatever gives anything but finite, positive readings', () =
     fc.record({ step: fc.constant('etch'), thickness_um: log(-3, 0) }),
   );
 
+  const mobility = fc.constantFrom('klaassen', 'masetti', 'arora', 'caughey-thomas', 'mf723');
+  const temperature = fc.double({ min: -70, max: 225, noNaN: true });
+  const activation = fc.constantFrom('full', 'solubility');
+  const solved = (parts: object) => solve(study(parts as Parameters<typeof study>[0]));
+
+  function expectReadings({ result }: Solution): void {
+    for (const layer of result.layers) {
+      for (const [key, value] of Object.entries(layer))
+        if (typeof value === 'number') expect(Number.isFinite(value), `${key} ${value}`).toBe(true);
+      expect(layer.sheetResistance_ohmSq).toBeGreaterThan(0);
+      expect(layer.bottom_um).toBeGreaterThan(layer.top_um);
+    }
+    for (const { depletion_um, builtIn_V, capacitance_nFcm2 } of result.junctions) {
+      if (depletion_um) expect(depletion_um[1]).toBeGreaterThan(depletion_um[0]);
+      if (capacitance_nFcm2 !== null) expect(capacitance_nFcm2).toBeGreaterThan(0);
+      if (builtIn_V !== null) expect(builtIn_V).toBeGreaterThan(0);
+    }
+    expect(result.mesh.nodes).toBeLessThan(6000);
+  }
+
   test('seeded random recipes of up to five steps', () => {
     fc.assert(
       fc.property(
         fc.array(step, { maxLength: 5 }),
-        fc.constantFrom('klaassen', 'masetti', 'arora', 'caughey-thomas', 'mf723'),
-        fc.double({ min: -70, max: 225, noNaN: true }),
-        fc.constantFrom('full', 'solubility'),
-        (steps, mobility, temperature_C, activation) => {
-          const { result, columns } = solve(
-            study({ steps, temperature_C, models: { mobility, activation } } as Parameters<typeof study>[0]),
-          );
-          for (const layer of result.layers) {
-            for (const [key, value] of Object.entries(layer))
-              if (typeof value === 'number') expect(value, key).not.toBeNaN();
-            expect(layer.sheetResistance_ohmSq).toBeGreaterThan(0);
-            expect(Number.isFinite(layer.sheetResistance_ohmSq)).toBe(true);
-            expect(layer.bottom_um).toBeGreaterThan(layer.top_um);
-          }
-          expect(columns.conductivity_Scm.every((value) => value > 0)).toBe(true);
-          expect(result.mesh.nodes).toBeLessThan(6000);
+        mobility,
+        temperature,
+        activation,
+        (steps, ...choices) => {
+          const [name, temperature_C, active] = choices;
+          const solution = solved({ steps, temperature_C, models: { mobility: name, activation: active } });
+          expectReadings(solution);
+          expect(solution.columns.conductivity_Scm.every((value) => value > 0)).toBe(true);
         },
       ),
       { numRuns: 400, seed: 2027 },
+    );
+  });
+
+  test('nor do surfaces, reverse voltages, levels and statistics of any kind', () => {
+    const surface = fc.oneof(
+      fc.constant(undefined),
+      log(9, 13.5).map((charge_cm2) => ({ charge_cm2 })),
+      log(9, 13.5).map((charge) => ({ charge_cm2: -charge })),
+      fc.double({ min: -1.2, max: 1.2, noNaN: true }).map((potential_V) => ({ potential_V })),
+    );
+    const models = fc.record({
+      ionisation: fc.constantFrom('complete', 'levels'),
+      statistics: fc.constantFrom('boltzmann', 'fermi-dirac'),
+      narrowing: fc.constantFrom('none', 'slotboom1976'),
+      activation,
+    });
+    fc.assert(
+      fc.property(
+        fc.array(step, { maxLength: 4 }),
+        models,
+        temperature,
+        surface,
+        fc.array(log(-1, 2.3), { maxLength: 3 }),
+        (steps, chosen, temperature_C, onSurface, reverseBias_V) => {
+          const models = { mobility: 'klaassen', ...chosen };
+          expectReadings(solved({ steps, temperature_C, models, surface: onSurface, reverseBias_V }));
+        },
+      ),
+      { numRuns: 250, seed: 4054 },
     );
   });
 });

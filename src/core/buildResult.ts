@@ -108,9 +108,9 @@ function junctionResults({ doping, electrostatics, cuts }: CarrierState): Juncti
     (junction): JunctionResult => ({
       metallurgical_um: junction.metallurgical === null ? null : metallurgical[junction.metallurgical],
       electrical_um: um(junction.depth),
-      depletion_um: [um(junction.depletion[0]), um(junction.depletion[1])],
+      depletion_um: junction.depletion && [um(junction.depletion.edges[0]), um(junction.depletion.edges[1])],
       builtIn_V: junction.builtIn,
-      capacitance_nFcm2: junction.capacitance * 1e9,
+      capacitance_nFcm2: junction.depletion && junction.depletion.capacitance * 1e9,
     }),
   );
   const matched = new Set(electrostatics.junctions.map((junction) => junction.metallurgical));
@@ -147,7 +147,7 @@ function layerResult(parts: BuiltParts, i: number): LayerResult {
     type: span.type,
     top_um: top * UM_PER_CM,
     bottom_um: bottom * UM_PER_CM,
-    bottomEdge: i < spans.length - 1 ? 'junction' : film,
+    bottomEdge: span.to < doping.depth.length - 1 ? 'junction' : film,
     sheetResistance_ohmSq: 1 / reading.sheetConductance,
     ...spreadOf(spread, i, reading.sheetConductance),
     sheetConductance_S: reading.sheetConductance,

@@ -13,8 +13,9 @@ export interface JunctionResult {
   metallurgical_um: number | null;
   /** Where n = p; with neutral carriers the same depth; null where a layer beside it is depleted and there is none. */
   electrical_um: number | null;
-  /** Edges of the depleted region and the built-in voltage; null with neutral carriers, which have neither. */
+  /** Edges of the depleted region; null with neutral carriers, and where a fixed surface or an emptied layer leaves none. */
   depletion_um: [number, number] | null;
+  /** Potential between the nearest neutral silicon above and below, bias apart; null with neutral carriers. */
   builtIn_V: number | null;
   /** Small-signal capacitance per area; permittivity over the distance of the two edges. */
   capacitance_nFcm2: number | null;

@@ -2,7 +2,7 @@
 
 import { type BuiltParts, buildColumns, buildResult } from './buildResult';
 import { type CarrierChoice, carriersOf } from './carriers/carriers';
-import { carrierWarnings } from './carriers/warnings';
+import { carrierWarnings, degeneracyWarnings } from './carriers/warnings';
 import { mobilityModel } from './mobility/list';
 import { ionisationFor, type MobilityModel } from './mobility/model';
 import { mobilityWarnings } from './mobility/warnings';
@@ -75,6 +75,7 @@ export function solve(study: Study, options: SolveOptions = {}): Solution {
     warnings: [
       ...process.warnings,
       ...carrierWarnings(choice, recipe.models.ionisation, doping),
+      ...degeneracyWarnings(state, choice),
       ...depletionWarnings(state),
       ...mobilityWarnings(model, flow.input),
     ],

@@ -25,8 +25,10 @@ const NEGLIGIBLE = 1e-6;
 const NEUTRAL = 1e-3;
 /** A cell is cut into at most so many at once: the first potential on coarse cells is only a guide. */
 const MOST_PIECES = 6;
-/** No cell is cut below this, cm. */
+/** No cell of the doping is cut below this at first, cm; a cell across a jump is narrower. */
 const NARROWEST = 1e-9;
+/** Where carriers pile up to many times the doping, they fall as 1/x^2: cells are smaller by this factor. */
+const PILED_UP = 2;
 
 export function cellEndsOf(doping: SampledDoping): number[] {
   return Array.from({ length: (doping.depth.length + 1) / 2 }, (_, i) => doping.depth[2 * i]);
@@ -126,7 +128,6 @@ export function refined(ends: readonly number[], found: Resolved, refinement: nu
 function piecesOf(found: Resolved, i: number, refinement: number): number {
   const { depth, potential, electrons, holes, temperature } = found;
   const width = depth[i + 2] - depth[i];
-  if (width <= NARROWEST) return 1;
   let carriers = 0;
   let charge = 0;
   let net = 0;
@@ -145,6 +146,7 @@ function piecesOf(found: Resolved, i: number, refinement: number): number {
   const widths = matters ? width / (WIDEST * debyeLength(carriers, temperature)) : 0;
   const reach = debyeLength(Math.max(net, carriers), temperature) * Math.max(1, found.intrinsic[i + 1] / net);
   const softness = Math.max(1, Math.sqrt(Math.sqrt(reach / SOFT)));
-  const wanted = refinement * softness * Math.max(change / POTENTIAL_CHANGE, widths);
+  const piledUp = charge > 2 * net ? PILED_UP : 1;
+  const wanted = refinement * softness * piledUp * Math.max(change / POTENTIAL_CHANGE, widths);
   return Math.max(1, Math.min(MOST_PIECES, Math.ceil(wanted - 1e-9)));
 }

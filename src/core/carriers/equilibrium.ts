@@ -10,7 +10,7 @@ import { resample } from '../profile/resample';
 import { setBias } from './bias';
 import { graded, nodesOf, refined } from './cells';
 import { ChargeModel, type Statistics } from './charge';
-import { crossings, electricalJunctions } from './junctions';
+import { crossings, electricalJunctions, parting } from './junctions';
 import { PoissonSystem, type SurfaceCondition, solvePoisson } from './poisson';
 import type { CarrierState } from './state';
 
@@ -140,7 +140,8 @@ function withEnds(ends: readonly number[], more: readonly number[]): number[] {
 function stateOf(found: Found, choice: EquilibriumChoice, cutDepths: readonly number[]): CarrierState {
   const { doping, charges, depth, potential } = found;
   const volt = thermalVoltage(choice.temperature);
-  const cuts = cutDepths.map((x) => depth.indexOf(x));
+  const positions = cutDepths.map((x) => depth.indexOf(x));
+  const cuts = parting(positions, found);
   const ionised = charges.ionised();
   return {
     doping,

@@ -6,16 +6,15 @@ import { intervalOf } from '../numeric/interval';
 import type { SampledDoping } from '../profile/doping';
 import type { ChargeModel } from './charge';
 import type { PoissonSystem } from './poisson';
-import type { ElectricalJunction } from './state';
+import { type CarrierState, type Depletion, type ElectricalJunction, majorityBetween } from './state';
 
-interface Found {
+type Carriers = Pick<CarrierState, 'electrons' | 'holes' | 'temperature'>;
+
+interface Found extends Carriers {
   readonly doping: SampledDoping;
-  /** K */
-  readonly temperature: number;
   readonly depth: Float64Array;
   /** kT/q */
   readonly potential: Float64Array;
-  readonly intrinsic: Float64Array;
   /** Evaluated at the potential. */
   readonly charges: ChargeModel;
 }
@@ -25,6 +24,10 @@ interface Solved extends Found {
   readonly system: PoissonSystem;
 }
 
+/** Charge over majority carriers up to which silicon is taken for neutral in looking for the built-in voltage. */
+const NEARLY_NEUTRAL = 0.1;
+/** To this part the charges of the two sides must be equal, and their distance permittivity over capacitance. */
+const BALANCE = 1e-3;
 /** Two cell ends may come as close as this, cm. */
 const CLOSEST = 1e-11;
 
@@ -76,37 +79,58 @@ function rootInHalf(
 const nearestEnd = (x: number, from: number, to: number): number =>
   x - from < CLOSEST ? from : to - x < CLOSEST ? to : x;
 
+/** Those of `cuts` (positions) that part different layers: a reverse bias can leave places of nothing where n = p, too. */
+export function parting(cuts: readonly number[], carriers: Carriers): number[] {
+  const last = carriers.electrons.length - 1;
+  const types = [0, ...cuts].map((from, k) => majorityBetween(carriers, from, cuts[k] ?? last));
+  return cuts.filter((_, k) => types[k] !== types[k + 1]);
+}
+
 /** What is to be said of the junctions at `cuts` (positions); `volt` is kT/q. Uses the system's workspace. */
 export function electricalJunctions(
   found: Solved,
   cuts: readonly number[],
   volt: number,
 ): ElectricalJunction[] {
-  const { depth, doping, charges, potential } = found;
-  const isNAt = (i: number): boolean => charges.logRatio(potential[i], i) > 0;
+  const { depth, doping } = found;
   const bounds = [0, ...cuts, depth.length - 1];
   const free = new Set(doping.junctions.map((_, k) => k));
-  return cuts.map((cut, k) => {
-    const isN = [isNAt(bounds[k] + 1), isNAt(cut + 1)];
-    const { edges, capacitance } = smallSignal(found, cut, bounds[k], bounds[k + 2], isN[0], volt);
-    const metallurgical = match(doping, depth[cut], isN[1], free);
+  return cuts.map((cut, k): ElectricalJunction => {
+    const [top, bottom] = [bounds[k], bounds[k + 2]];
+    const [above, below] = [majorityBetween(found, top, cut), majorityBetween(found, cut, bottom)];
+    const isN = above === 'n' || (above === null && below === 'p');
+    const metallurgical = match(doping, depth[cut], !isN, free);
     if (metallurgical !== null) free.delete(metallurgical);
-    const [upper, lower] = edges.map((x) => bandBending(found, x));
-    return {
-      depth: depth[cut],
-      metallurgical,
-      depletion: edges,
-      capacitance,
-      builtIn: Math.abs(upper - lower) * volt,
-    };
+    const place = { depth: depth[cut], metallurgical };
+    if (above === null || below === null) return { ...place, depletion: null, builtIn: null };
+    const depletion = smallSignal(found, cut, top, bottom, isN, volt);
+    const [upper, lower] = (depletion?.edges ?? [depth[cut], depth[cut]]).map((x) => nodeAt(depth, x));
+    const bending = bandBending(found, upper, top, isN) + bandBending(found, lower, bottom, !isN);
+    return { ...place, depletion, builtIn: volt * bending };
   });
 }
 
-/** Potential of neutral silicon with the doping at a depth against undoped silicon, kT/q. */
-function bandBending({ depth, doping, intrinsic }: Found, x: number): number {
-  const i = Math.max(0, intervalOf(depth, x));
-  return Math.asinh(doping.net[i] / (2 * intrinsic[i]));
+/**
+ * How far the bands of neutral silicon bend towards n, or towards p, against its Fermi level, kT/q: of the first that is found from
+ * position `from` to `to`. Where none is, as in layers thinner than their depletion, how far they bend at most.
+ */
+function bandBending({ potential, charges }: Found, from: number, to: number, isN: boolean): number {
+  const { charge, response, electrons, holes, electronLevel, holeLevel } = charges;
+  const [carriers, level, sign] = isN ? [electrons, electronLevel, 1] : [holes, holeLevel, -1];
+  const step = from < to ? 1 : -1;
+  let most = Number.NEGATIVE_INFINITY;
+  for (let i = from; i !== to + step; i += step) {
+    const bent = sign * (potential[i] - level[i]);
+    const lacking = (sign * charge[i]) / carriers[i];
+    // By the logarithm of doping over carriers the bands bend further; less quickly do carriers answer that are degenerate.
+    if (Math.abs(lacking) < NEARLY_NEUTRAL) return bent + (Math.log1p(lacking) * carriers[i]) / response[i];
+    most = Math.max(most, bent);
+  }
+  return most;
 }
+
+const nodeAt = (depth: Float64Array, x: number): number =>
+  Math.min(depth.length - 1, Math.max(0, intervalOf(depth, x)));
 
 /**
  * The charge that follows a small change of the voltage across a junction: everything above it has its Fermi level raised by one
@@ -120,7 +144,7 @@ function smallSignal(
   bottom: number,
   isN: boolean,
   volt: number,
-): { edges: [number, number]; capacitance: number } {
+): Depletion | null {
   const { response, electronResponse } = charges;
   const raised = (i: number): number => {
     const ofElectrons = electronResponse[i];
@@ -151,10 +175,11 @@ function smallSignal(
   };
   const upper = side(0, cut);
   const lower = side(cut, depth.length - 1);
-  return {
-    edges: [upper.centre, lower.centre],
-    capacitance: (ELEMENTARY_CHARGE * Math.abs(upper.charge)) / volt,
-  };
+  const capacitance = (ELEMENTARY_CHARGE * Math.abs(upper.charge)) / volt;
+  const isWhole =
+    Math.abs(((lower.centre - upper.centre) * capacitance) / PERMITTIVITY - 1) < BALANCE &&
+    Math.abs(upper.charge + lower.charge) < BALANCE * Math.abs(upper.charge);
+  return isWhole ? { edges: [upper.centre, lower.centre], capacitance } : null;
 }
 
 /** The nearest sign change of net doping in the same sense that no other junction has taken. */

@@ -1,10 +1,12 @@
 /** What is to be said about the carriers at a temperature. */
 
 import { INTRINSIC_RANGE, INTRINSIC_SOURCE } from '../material/intrinsic';
+import { densitiesOfStates } from '../material/silicon';
 import type { SampledDoping } from '../profile/doping';
 import type { Warning } from '../study/problem';
 import type { CarrierChoice } from './carriers';
 import { hasLevel } from './ionisation';
+import type { CarrierState } from './state';
 
 /** A remark when `temperature` (K) lies outside the measurements behind the intrinsic density. */
 export function intrinsicWarnings(temperature: number): Warning[] {
@@ -43,4 +45,27 @@ export function carrierWarnings(
       message: 'neutral carriers know no bias: reverseBias_V has no effect with models.carriers "neutral"',
     });
   return warnings;
+}
+
+/**
+ * A remark when a charged surface piles up more carriers than the band has states and the stack has dopants: Boltzmann statistics
+ * then know no bounds.
+ */
+export function degeneracyWarnings(
+  { doping, electrons, holes, temperature }: CarrierState,
+  { statistics }: CarrierChoice,
+): Warning[] {
+  if (statistics !== 'boltzmann') return [];
+  const { conduction, valence } = densitiesOfStates(temperature);
+  const most = (column: Float64Array): number => column.reduce((a, b) => Math.max(a, b), 0);
+  const dopants = Math.max(most(doping.donors), most(doping.acceptors));
+  return [
+    { kind: 'electrons', peak: most(electrons), states: conduction },
+    { kind: 'holes', peak: most(holes), states: valence },
+  ]
+    .filter(({ peak, states }) => peak > Math.max(states, 2 * dopants))
+    .map(({ kind, peak, states }) => ({
+      code: 'statistics-range',
+      message: `the surface piles up ${peak.toExponential(1)} cm^-3 of ${kind}, more than the band's ${states.toExponential(1)} states: Boltzmann statistics exaggerate there; set models.statistics to "fermi-dirac"`,
+    }));
 }

@@ -1,7 +1,7 @@
 /** A layer between reverse-biased junctions: sheet resistance, depletion and capacitance against voltage, and pinch-off. */
 
 import { type CarrierChoice, carriersOf } from '../carriers/carriers';
-import type { CarrierState, ElectricalJunction } from '../carriers/state';
+import type { CarrierState, Depletion } from '../carriers/state';
 import { brent } from '../numeric/brent';
 import { conduction } from '../sheet/conduction';
 import { FILLED, filling } from '../sheet/depletion';
@@ -79,13 +79,13 @@ export function biasSweep(study: Study, span: BiasSpan): BiasResult {
     junctions: (['upper', 'lower'] as const).flatMap((position) => {
       const junction = layer[position];
       if (junction === null) return [];
-      const found = states.map((state) => junctionOf(state, junction));
+      const found = states.map((state) => depletionOf(state, junction));
       return [
         {
           position,
           metallurgical_um: prepared.doping.depth[prepared.doping.junctions[junction]] * UM_PER_CM,
           depletion_um: found.map((each) =>
-            each ? [each.depletion[0] * UM_PER_CM, each.depletion[1] * UM_PER_CM] : null,
+            each ? [each.edges[0] * UM_PER_CM, each.edges[1] * UM_PER_CM] : null,
           ),
           capacitance_nFcm2: found.map((each) => (each ? each.capacitance * 1e9 : null)),
         },
@@ -136,8 +136,9 @@ function sheetResistanceOf(state: CarrierState, layer: FollowedLayer, { model }:
   return 1 / sheetConductance(state.doping.depth, conduction(state, model).conductivity, span);
 }
 
-const junctionOf = (state: CarrierState, metallurgical: number): ElectricalJunction | undefined =>
-  state.electrostatics?.junctions.find((junction) => junction.metallurgical === metallurgical);
+const depletionOf = (state: CarrierState, metallurgical: number): Depletion | null =>
+  state.electrostatics?.junctions.find((junction) => junction.metallurgical === metallurgical)?.depletion ??
+  null;
 
 /** Per cent a volt, by the one-sided difference of second order. */
 function voltageCoefficient([zero, one, two]: (number | null)[]): number | null {

@@ -24,17 +24,16 @@ export function followedLayer(state: CarrierState, index: number): FollowedLayer
     throw new NoSolution(
       `there is no layer ${index}; the study has ${spans.length === 1 ? 'one layer' : `${spans.length} layers`}`,
     );
-  const metallurgical = (cut: number): number | null =>
-    state.electrostatics
-      ? (state.electrostatics.junctions[cut]?.metallurgical ?? null)
-      : cut in state.cuts
-        ? cut
-        : null;
+  const metallurgical = (end: number): number | null => {
+    const cut = state.cuts.indexOf(end);
+    if (cut < 0) return null;
+    return state.electrostatics ? state.electrostatics.junctions[cut].metallurgical : cut;
+  };
   return {
     index,
     type: span.type,
-    upper: index > 1 ? metallurgical(index - 2) : null,
-    lower: index <= state.cuts.length ? metallurgical(index - 1) : null,
+    upper: metallurgical(span.from),
+    lower: metallurgical(span.to),
     top: state.doping.depth[span.from],
     bottom: state.doping.depth[span.to],
   };

@@ -7,7 +7,7 @@
  * average of R. L. Petritz, Phys. Rev. 110, 1254 (1958) taken to a continuum (from memory).
  */
 
-import type { CarrierState } from '../carriers/state';
+import { type CarrierState, majorityBetween } from '../carriers/state';
 import { ELEMENTARY_CHARGE } from '../material/constants';
 import { integrate } from '../numeric/simpson';
 import type { SampledDoping } from '../profile/doping';
@@ -36,12 +36,16 @@ export interface LayerReadings {
   readonly peakDepth: number;
 }
 
-/** The layers from the surface down, between the cuts where one kind of carrier takes over from the other. */
-export function layerSpans({ cuts, electrons, holes }: CarrierState): LayerSpan[] {
-  const bounds = [0, ...cuts, electrons.length - 1];
-  return bounds.slice(1).map((to, i) => {
+/**
+ * The layers from the surface down, between the cuts where one kind of carrier takes over from the other. A layer that a reverse
+ * bias has emptied is none.
+ */
+export function layerSpans(state: CarrierState): LayerSpan[] {
+  const bounds = [0, ...state.cuts, state.electrons.length - 1];
+  return bounds.slice(1).flatMap((to, i): LayerSpan[] => {
     const from = bounds[i];
-    return { from, to, type: electrons[from + 1] > holes[from + 1] ? 'n' : 'p' };
+    const type = majorityBetween(state, from, to);
+    return type ? [{ from, to, type }] : [];
   });
 }
 
