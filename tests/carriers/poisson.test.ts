@@ -186,7 +186,7 @@ describe('the elements', () => {
       const charges = new ChargeModel({ dopants, donors, acceptors }, statistics);
       const u = new Float64Array(depth.length);
       charges.neutralPotential(u, 0.1);
-      solvePoisson(new PoissonSystem(depth, ROOM, false), charges, { charge: 0 }, u);
+      solvePoisson(new PoissonSystem(depth, ROOM, false), charges, { charge: 0 }, u, 1e-8);
       return u[cells / 2];
     };
     const exact = potentialAt(1600);

@@ -158,6 +158,7 @@ export class ChargeModel {
     const length = Math.abs(step);
     const raised = step > 0 ? this.electrons[i] : this.holes[i];
     const all = this.electrons[i] + this.holes[i] + this.#doping.donors[i] + this.#doping.acceptors[i];
+    if (length < Math.LN2 && 2 * raised <= all) return step;
     const free =
       raised > FEWEST
         ? Math.log(all / raised)

@@ -25,6 +25,9 @@ export interface EquilibriumChoice extends Statistics {
 
 /** The first potentials only guide the cutting; after so many rounds the mesh is as fine as asked for. */
 const MOST_ROUNDS = 12;
+/** Steps, kT/q, that end the iteration: on the way to the mesh, and on it. */
+const GUIDE_STEP = 1e-3;
+const LAST_STEP = 1e-5;
 /** Accuracy of the neutral potential, kT/q: as a start, and where a surface potential is measured from it. */
 const START_TOLERANCE = 0.1;
 const SURFACE_TOLERANCE = 1e-10;
@@ -38,19 +41,15 @@ interface Start {
 export function equilibrium(doping: SampledDoping, choice: EquilibriumChoice): CarrierState {
   const isCharged = 'potential' in choice.surface || choice.surface.charge !== 0;
   let ends: readonly number[] = graded(doping, choice.temperature, isCharged, choice.refinement);
-  let found = solveOn(doping, ends, choice, null);
+  let guide = solveOn(doping, ends, choice, null, GUIDE_STEP);
   for (let round = 0; round < MOST_ROUNDS; round++) {
-    const finer = refined(ends, found, choice.refinement);
+    const finer = refined(ends, guide, choice.refinement);
     if (finer === ends) break;
     ends = finer;
-    found = solveOn(doping, ends, choice, found);
+    guide = solveOn(doping, ends, choice, guide, GUIDE_STEP);
   }
-  const cuts = crossings(found);
-  if (cuts.length > 0) {
-    ends = withEnds(ends, cuts);
-    found = solveOn(doping, ends, choice, found);
-  }
-  return stateOf(found, choice, cuts);
+  const cuts = crossings(guide);
+  return stateOf(solveOn(doping, withEnds(ends, cuts), choice, guide, LAST_STEP), choice, cuts);
 }
 
 /** The same stack at another temperature or bias on the mesh that was found for it, starting from its potential. */
@@ -59,7 +58,8 @@ export function equilibriumNear(state: CarrierState, choice: EquilibriumChoice):
   if (!potential) throw new Error('the state has no potential to start from');
   const { depth } = state.doping;
   const scale = 1 / thermalVoltage(choice.temperature);
-  const found = solveNodes(state.doping, choice, { depth, potential: potential.map((v) => v * scale) });
+  const start = { depth, potential: potential.map((v) => v * scale) };
+  const found = solveNodes(state.doping, choice, start, LAST_STEP);
   return stateOf(
     found,
     choice,
@@ -86,12 +86,18 @@ function solveOn(
   doping: SampledDoping,
   ends: readonly number[],
   choice: EquilibriumChoice,
-  start: Start | null,
+  start: Found | null,
+  shortest: number,
 ): Found {
-  return solveNodes(resample(doping, nodesOf(ends)), choice, start);
+  return solveNodes(resample(doping, nodesOf(ends), start?.doping), choice, start, shortest);
 }
 
-function solveNodes(doping: SampledDoping, choice: EquilibriumChoice, start: Start | null): Found {
+function solveNodes(
+  doping: SampledDoping,
+  choice: EquilibriumChoice,
+  start: Start | null,
+  shortest: number,
+): Found {
   const { depth, donors, acceptors } = doping;
   const { temperature, surface } = choice;
   const charges = new ChargeModel(doping, choice);
@@ -105,7 +111,7 @@ function solveNodes(doping: SampledDoping, choice: EquilibriumChoice, start: Sta
     if (isFixed) condition = { potential: neutral[0] + surface.potential / thermalVoltage(temperature) };
   }
   const system = new PoissonSystem(depth, temperature, isFixed);
-  solvePoisson(system, charges, condition, potential);
+  solvePoisson(system, charges, condition, potential, shortest);
   const { electrons, holes, charge, intrinsic } = charges;
   return {
     doping,

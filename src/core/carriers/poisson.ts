@@ -16,8 +16,6 @@ import type { ChargeModel } from './charge';
 export type SurfaceCondition = { readonly charge: number } | { readonly potential: number };
 
 const MOST_STEPS = 200;
-/** A step shorter than this (kT/q) ends the iteration; the next one would be its square. */
-const SHORTEST_STEP = 1e-8;
 
 /** The linear system of one mesh: what Newton's method and small changes of bias share. */
 export class PoissonSystem {
@@ -99,6 +97,7 @@ export class PoissonSystem {
 /**
  * Solves for the potential `u` (kT/q), which holds the start and is overwritten; `charge` holds the carriers afterwards. The last
  * node has zero field: neutral silicon, or an insulator without charge.
+ * @param shortest a step that is nowhere longer, kT/q, ends the iteration; what is left is about its square.
  * @throws Error when the iteration does not end, which would be a defect.
  */
 export function solvePoisson(
@@ -106,6 +105,7 @@ export function solvePoisson(
   charge: ChargeModel,
   surface: SurfaceCondition,
   u: Float64Array,
+  shortest: number,
 ): void {
   const isFixed = 'potential' in surface;
   if (isFixed) u[0] = surface.potential;
@@ -121,7 +121,7 @@ export function solvePoisson(
       if (length > largest) largest = length;
       u[i] += charge.heldBack(step[i], u[i], i);
     }
-    if (largest < SHORTEST_STEP) {
+    if (largest < shortest) {
       charge.evaluate(u);
       return;
     }
