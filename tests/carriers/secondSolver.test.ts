@@ -1,12 +1,14 @@
 import { describe, expect, test } from 'vitest';
 import { equilibrium } from '../../src/core/carriers/equilibrium';
 import { ELEMENTARY_CHARGE } from '../../src/core/material/constants';
+import { thermalVoltage } from '../../src/core/material/silicon';
 import { mobilityModel } from '../../src/core/mobility/list';
+import { integrate } from '../../src/core/numeric/simpson';
 import { conduction } from '../../src/core/sheet/conduction';
 import { layerReadings, layerSpans } from '../../src/core/sheet/layers';
 import { choice } from '../support/carriers';
 import { dopingOf } from '../support/doping';
-import { plainPoisson } from '../support/plainPoisson';
+import { type PlainExtras, plainPoisson } from '../support/plainPoisson';
 
 const UM = 1e-4;
 const klaassen = mobilityModel('klaassen');
@@ -104,5 +106,73 @@ describe('sheet conductance against a second solver, ten stacks', () => {
       const extrapolated = fine[k] + (fine[k] - coarse[k]) / 3;
       expect(Math.abs(conductance / extrapolated - 1)).toBeLessThan(1e-3);
     });
+  });
+});
+
+/** Integrals of electrons and holes of a plain solution, extrapolated from two meshes, cm^-2. */
+function plainDoses(stack: Stack, extras: PlainExtras): { electrons: number; holes: number } {
+  const [coarse, fine] = [6000, 12000].map((count) => {
+    const net = (x: number) => stack.donors(x) - stack.acceptors(x);
+    const found = plainPoisson(net, stack.end * UM, 0.3 * UM, count, stack.temperature, extras);
+    const dose = (column: number[]) =>
+      column.reduce((sum, value, i) => {
+        const step = i > 0 ? found.depth[i] - found.depth[i - 1] : 0;
+        return sum + (step * (value + column[Math.max(0, i - 1)])) / 2;
+      }, 0);
+    return { electrons: dose(found.electrons), holes: dose(found.holes) };
+  });
+  const extrapolated = (key: 'electrons' | 'holes') => fine[key] + (fine[key] - coarse[key]) / 3;
+  return { electrons: extrapolated('electrons'), holes: extrapolated('holes') };
+}
+
+/** The same of the program's solution. */
+function ourDoses(stack: Stack, parts: Parameters<typeof choice>[0]): { electrons: number; holes: number } {
+  const marks = [0.05, 0.1, 0.2, 0.4, 0.6, 0.8, 1, 1.3].map((um) => um * UM);
+  const doping = dopingOf(stack.donors, stack.acceptors, stack.end * UM, marks);
+  const state = equilibrium(doping, choice({ temperature: stack.temperature, ...parts }));
+  const dose = (column: Float64Array) => integrate(state.doping.depth, column, 0, column.length - 1);
+  return { electrons: dose(state.electrons), holes: dose(state.holes) };
+}
+
+function expectSame(ours: ReturnType<typeof ourDoses>, plain: ReturnType<typeof plainDoses>): void {
+  for (const key of ['electrons', 'holes'] as const)
+    expect(Math.abs(ours[key] / plain[key] - 1), key).toBeLessThan(5e-4);
+}
+
+describe('doses of the carriers against the second solver', () => {
+  const resistor = STACKS['a resistor'];
+
+  test.each([-3e11, 2e11, 8e11])('under a surface charge of %f cm^-2', (charge) => {
+    expectSame(ourDoses(resistor, { surface: { charge } }), plainDoses(resistor, { surfaceCharge: charge }));
+  });
+
+  test.each([230, 298, 420])('with dopant levels at %i K', (temperature) => {
+    const stack: Stack = {
+      donors: sum(gauss(4e18, 0, 0.1), flat(3e15)),
+      acceptors: gauss(8e17, 0.1, 0.3),
+      end: 20,
+      temperature,
+    };
+    // Altermatt's levels (see the program's own file for the source), written out once more.
+    const kT = 8.617333262e-5 * temperature;
+    const t = temperature / 300;
+    const phosphorus = (N: number, n: number) =>
+      (N / (1 + (N / 6e18) ** 2.3)) *
+      (n / (n + 0.5 * 2.86e19 * t ** 1.58 * Math.exp(-0.0455 / (1 + (N / 2.2e18) ** 2) / kT)));
+    const boron = (N: number, p: number) =>
+      (N / (1 + (N / 4.5e18) ** 2.4)) *
+      (p / (p + 0.25 * 3.1e19 * t ** 1.85 * Math.exp(-0.04439 / (1 + (N / 1.3e18) ** 1.4) / kT)));
+    const bound = (x: number, n: number, p: number) =>
+      boron(stack.acceptors(x), p) - phosphorus(stack.donors(x), n);
+    expectSame(ourDoses(stack, { ionisation: 'levels' }), plainDoses(stack, { bound }));
+  });
+
+  test.each([1, 10])('with %i V in reverse', (reverse) => {
+    // Electrons keep the level of the wafer, holes that of the layer, which is the lower one.
+    const level = -reverse / thermalVoltage(resistor.temperature);
+    expectSame(
+      ourDoses(resistor, { reverseBias: [reverse] }),
+      plainDoses(resistor, { levels: () => [0, level] }),
+    );
   });
 });

@@ -1,6 +1,6 @@
 /**
  * A second solver for Poisson's equation, written plainly and otherwise than the program's: finite differences in a stretched
- * coordinate on many nodes, damped Newton with a full step limit, extrapolated from two meshes. Complete ionisation, Boltzmann.
+ * coordinate on many nodes, damped Newton with a full step limit, extrapolated from two meshes. Boltzmann.
  */
 
 import { ELEMENTARY_CHARGE } from '../../src/core/material/constants';
@@ -19,18 +19,38 @@ function stretched(end: number, scale: number, count: number): number[] {
   return Array.from({ length: count + 1 }, (_, i) => scale * Math.sinh((last * i) / count));
 }
 
+/** What a stack may have beside completely ionised doping in equilibrium. */
+export interface PlainExtras {
+  /** Charge of dopants that hold their carrier, cm^-3: of bound donors less, of bound acceptors more. */
+  bound?: (depth: number, electrons: number, holes: number) => number;
+  /** cm^-2 */
+  surfaceCharge?: number;
+  /** Fermi levels of electrons and holes, kT/q. */
+  levels?: (depth: number) => readonly [number, number];
+}
+
+const DIFFERENCE = 1e-6;
+
 export function plainPoisson(
   net: (depth: number) => number,
   end: number,
   scale: number,
   count: number,
   temperature: number,
+  { bound = () => 0, surfaceCharge = 0, levels = () => [0, 0] }: PlainExtras = {},
 ): PlainSolution {
   const ni = intrinsicDensity(temperature);
   const flux = (PERMITTIVITY * thermalVoltage(temperature)) / ELEMENTARY_CHARGE;
   const x = stretched(end, scale, count);
   const doping = x.map(net);
-  const u = doping.map((value) => Math.asinh(value / (2 * ni)));
+  const fermi = x.map(levels);
+  const u = doping.map((value, i) => fermi[i][value > 0 ? 0 : 1] + Math.asinh(value / (2 * ni)));
+  const electrons = (v: number, i: number) => ni * Math.exp(v - fermi[i][0]);
+  const holes = (v: number, i: number) => ni * Math.exp(fermi[i][1] - v);
+  const density = (v: number, i: number) => {
+    const [n, p] = [electrons(v, i), holes(v, i)];
+    return p - n + doping[i] + bound(x[i], n, p);
+  };
   for (let round = 0; ; round++) {
     if (round > 500) throw new Error('no convergence');
     const [below, diagonal, above, right] = [0, 1, 2, 3].map(() => new Array<number>(count + 1).fill(0));
@@ -38,15 +58,16 @@ export function plainPoisson(
       const left = i > 0 ? x[i] - x[i - 1] : 0;
       const next = i < count ? x[i + 1] - x[i] : 0;
       const volume = (left + next) / 2;
-      const [n, p] = [ni * Math.exp(u[i]), ni * Math.exp(-u[i])];
+      const response = (density(u[i] - DIFFERENCE, i) - density(u[i] + DIFFERENCE, i)) / (2 * DIFFERENCE);
       const [a, c] = [i > 0 ? flux / left : 0, i < count ? flux / next : 0];
       below[i] = -a;
       above[i] = -c;
-      diagonal[i] = a + c + volume * (n + p);
+      diagonal[i] = a + c + volume * response;
       right[i] =
         (i > 0 ? a * (u[i - 1] - u[i]) : 0) +
         (i < count ? c * (u[i + 1] - u[i]) : 0) +
-        volume * (p - n + doping[i]);
+        volume * density(u[i], i) +
+        (i === 0 ? surfaceCharge : 0);
     }
     for (let i = 1; i <= count; i++) {
       const factor = below[i] / diagonal[i - 1];
@@ -60,7 +81,7 @@ export function plainPoisson(
     }
     const limit = Math.min(1, 2 / largest);
     for (let i = 0; i <= count; i++) u[i] += limit * right[i];
-    if (largest < 1e-10) break;
+    if (largest < 1e-9) break;
   }
-  return { depth: x, electrons: u.map((v) => ni * Math.exp(v)), holes: u.map((v) => ni * Math.exp(-v)) };
+  return { depth: x, electrons: u.map(electrons), holes: u.map(holes) };
 }
