@@ -1,7 +1,7 @@
 /** Junctions as the carriers see them: where n = p, how far the depletion reaches, and which sign change of doping they belong to. */
 
 import { ELEMENTARY_CHARGE } from '../material/constants';
-import { PERMITTIVITY, thermalVoltage } from '../material/silicon';
+import { debyeLength, PERMITTIVITY, thermalVoltage } from '../material/silicon';
 import { intervalOf } from '../numeric/interval';
 import type { SampledDoping } from '../profile/doping';
 import type { ChargeModel } from './charge';
@@ -26,6 +26,8 @@ interface Solved extends Found {
 
 /** Charge over majority carriers up to which silicon is taken for neutral in looking for the built-in voltage. */
 const NEARLY_NEUTRAL = 0.1;
+/** Debye lengths over which it must be so. */
+const NEUTRAL_LENGTHS = 3;
 /** To this part the charges of the two sides must be equal, and their distance permittivity over capacitance. */
 const BALANCE = 1e-3;
 /** Two cell ends may come as close as this, cm. */
@@ -114,19 +116,28 @@ export function electricalJunctions(
  * How far the bands of neutral silicon bend towards n, or towards p, against its Fermi level, kT/q: of the first that is found from
  * position `from` to `to`. Where none is, as in layers thinner than their depletion, how far they bend at most.
  */
-function bandBending({ potential, charges }: Found, from: number, to: number, isN: boolean): number {
+function bandBending(found: Found, from: number, to: number, isN: boolean): number {
+  const { depth, potential, charges, temperature } = found;
   const { charge, response, electrons, holes, electronLevel, holeLevel } = charges;
   const [carriers, level, sign] = isN ? [electrons, electronLevel, 1] : [holes, holeLevel, -1];
   const step = from < to ? 1 : -1;
+  const bent = (i: number): number => sign * (potential[i] - level[i]);
+  const lacking = (i: number): number => (sign * charge[i]) / carriers[i];
+  // By the logarithm of doping over carriers the bands bend further; less quickly do carriers answer that are degenerate.
+  const neutral = (i: number): number => bent(i) + (Math.log1p(lacking(i)) * carriers[i]) / response[i];
   let most = Number.NEGATIVE_INFINITY;
+  let first = -1;
   for (let i = from; i !== to + step; i += step) {
-    const bent = sign * (potential[i] - level[i]);
-    const lacking = (sign * charge[i]) / carriers[i];
-    // By the logarithm of doping over carriers the bands bend further; less quickly do carriers answer that are degenerate.
-    if (Math.abs(lacking) < NEARLY_NEUTRAL) return bent + (Math.log1p(lacking) * carriers[i]) / response[i];
-    most = Math.max(most, bent);
+    most = Math.max(most, bent(i));
+    if (Math.abs(lacking(i)) >= NEARLY_NEUTRAL) first = -1;
+    else if (first < 0) first = i;
+    // Charge that only changes its sign is gone within a Debye length.
+    if (first >= 0) {
+      const reach = NEUTRAL_LENGTHS * debyeLength(carriers[first], temperature);
+      if (Math.abs(depth[i] - depth[first]) >= reach) return neutral(first);
+    }
   }
-  return most;
+  return first >= 0 ? neutral(first) : most;
 }
 
 const nodeAt = (depth: Float64Array, x: number): number =>
