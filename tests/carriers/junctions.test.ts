@@ -93,6 +93,23 @@ describe('a layer that a bias has emptied', () => {
     }
   });
 
+  test('may be all there is: a thin film that 14 V empty of electrons keeps the charge of its holes', () => {
+    const film = dopingOf(
+      (x) => (x < 0.381 * UM ? 1 : 3.2e15),
+      (x) => (x < 0.381 * UM ? 1.95e14 : 1),
+      0.3868 * UM,
+      [],
+      1,
+      [0.381 * UM],
+    );
+    const { state: found } = solved(film, { reverseBias: [14] });
+    const { depth, acceptors, donors } = found.doping;
+    const dose = (column: Float64Array) => integrate(depth, column, 0, depth.length - 1);
+    // All that holes can neutralise is the excess of acceptors.
+    expect(dose(found.holes) / (dose(acceptors) - dose(donors))).toBeCloseTo(1, 9);
+    expect(layerSpans(found).map(({ type }) => type)).toEqual(['p']);
+  });
+
   test('leaves finite readings of the layers around it', () => {
     const flow = conduction(state, mobilityModel('klaassen'));
     for (const span of layerSpans(state))

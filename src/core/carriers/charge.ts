@@ -32,6 +32,10 @@ export interface ActiveColumns {
 /** Charge below this part of all carriers and dopants may be nothing but rounding. */
 const ROUNDING = 4 * Number.EPSILON;
 const MOST_ROUNDS = 200;
+/** Response to the potential, as a part of the doping, below which Newton's steps are the same whatever it is. */
+const LEAST_RESPONSE = 1e-8;
+/** How far a step may go, kT/q, beyond where the carriers it raises reach the density of everything charged. */
+const MOST_OVER = 4;
 /** Carriers below this, cm^-3, are told by their Fermi level: the next floating-point numbers lose digits, then there are none. */
 const FEWEST = 1e-250;
 
@@ -163,7 +167,32 @@ export class ChargeModel {
       raised > FEWEST
         ? Math.log(all / raised)
         : Math.log(all / this.intrinsic[i]) - (step > 0 ? u - this.electronLevel[i] : this.holeLevel[i] - u);
-    return length <= free ? step : Math.sign(step) * (free + Math.log1p(length - free));
+    return length <= free ? step : Math.sign(step) * (free + Math.min(MOST_OVER, Math.log1p(length - free)));
+  }
+
+  /**
+   * Raises `response` where there are hardly any carriers, until the next evaluation: with every layer emptied by a bias the linear
+   * system would be singular to rounding and not even the sign of its steps be known.
+   */
+  steady(): void {
+    const { response } = this;
+    const { donors, acceptors } = this.#doping;
+    for (let i = 0; i < response.length; i++)
+      response[i] = Math.max(response[i], LEAST_RESPONSE * (donors[i] + acceptors[i]));
+  }
+
+  /**
+   * Draws a start `u` to where neither carriers exceed the densest doping of the stack tenfold: beyond, Newton's steps would come back
+   * by no more than kT/q each.
+   */
+  bound(u: Float64Array): void {
+    const { donors, acceptors } = this.#doping;
+    let densest = 0;
+    for (let i = 0; i < u.length; i++) densest = Math.max(densest, donors[i] + acceptors[i]);
+    for (let i = 0; i < u.length; i++) {
+      const reach = Math.log((10 * densest) / this.intrinsic[i] + 10);
+      u[i] = Math.max(Math.min(u[i], this.electronLevel[i] + reach), this.holeLevel[i] - reach);
+    }
   }
 
   /** ln(n/p) of node i at the last evaluated potential u; by their Fermi levels where either is too few to be counted. */

@@ -103,6 +103,7 @@ function solveNodes(
   const charges = new ChargeModel(doping, choice);
   setBias(charges, doping, choice.reverseBias, thermalVoltage(temperature));
   const potential = start ? interpolated(start, depth) : new Float64Array(depth.length);
+  if (start) charges.bound(potential);
   const isFixed = 'potential' in surface;
   let condition: SurfaceCondition = { charge: isFixed ? 0 : surface.charge };
   if (isFixed || !start) {

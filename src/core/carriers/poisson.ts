@@ -114,6 +114,7 @@ export function solvePoisson(
     charge.evaluate(u);
     system.residual(u, charge.charge);
     if (!isFixed) step[0] += surface.charge;
+    charge.steady();
     system.solve(charge.response);
     let largest = 0;
     for (let i = 0; i < u.length; i++) {
