@@ -94,6 +94,24 @@ describe('editing the recipe', () => {
     expect(await person.field('steps[0].energy_keV').inputValue()).toBe('60');
   });
 
+  test('what stands in for channelling and implant damage is chosen on a step, and goes with what it is for', async () => {
+    await person.openStep(1);
+    await person.openStep(2);
+    const [tail, transient] = [person.field('steps[0].tail'), person.field('steps[1].transient')];
+    await person.changes(() => tail.selectOption('exponential'));
+    await person.changes(() => transient.selectOption('plusOne'));
+    expect(await person.sheetResistance()).toBe(
+      predicted(({ steps }) => {
+        Object.assign(steps[0], { tail: 'exponential' });
+        Object.assign(steps[1], { transient: 'plusOne' });
+      }),
+    );
+    await person.changes(() => person.field('steps[0].dopant').selectOption('phosphorus'));
+    expect(await tail.count()).toBe(0);
+    for (let i = 0; i < 3; i++) await person.changes(() => person.press('Control+Z'));
+    expect(await person.sheetResistance()).toBe(predicted());
+  });
+
   test('steps are added, moved, switched off, duplicated and removed, each undone by one Ctrl+Z', async () => {
     await person.button('Add a step').click();
     await person.changes(() => desktop.page.getByRole('menuitem', { name: /^Etch/ }).click());

@@ -43,6 +43,7 @@ function History({ result: { entries } }: { result: HistoryResult }) {
         xTitle="step"
         yTitle="sheet resistance (Ω/sq)"
         log
+        counts
       />
       <SweepTable
         label="Layers after every step"
@@ -60,7 +61,7 @@ function History({ result: { entries } }: { result: HistoryResult }) {
       />
       <p class="card-note">
         What is implanted and not annealed yet reads as if it were active. √Dt adds the heat up with the
-        constant diffusivities of the chosen set.
+        constant diffusivities of the chosen set, and what anneals have taken in of implant damage.
       </p>
     </>
   );

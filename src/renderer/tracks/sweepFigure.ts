@@ -16,15 +16,19 @@ export interface SweepFigure {
   readonly yTitle: string;
   /** Logarithmic upwards. */
   readonly log?: boolean;
+  /** Along x there are whole numbers alone. */
+  readonly counts?: boolean;
 }
 
 const DASHES = ['solid', '7px,3px', '2px,3px', '9px,3px,2px,3px', '12px,4px'];
 const FONT_SIZE = 12;
 /** Fewer points than this are marked. */
 const FEW = 20;
+/** Labels of whole numbers. */
+const MOST_COUNTS = 15;
 
 export function buildSweepFigure(
-  { lines, xTitle, yTitle, log = false }: SweepFigure,
+  { lines, xTitle, yTitle, log = false, counts = false }: SweepFigure,
   theme: Theme,
   font: string,
   size: Size,
@@ -62,7 +66,11 @@ export function buildSweepFigure(
       legend: { x: 0.02, y: 0.98, bgcolor: `${palette.ground}cc` },
       hovermode: 'x unified',
       hoverlabel: { bgcolor: palette.ground, bordercolor: palette.axis, font: { color: palette.ink } },
-      xaxis: { ...axis, title: { text: xTitle, standoff: 6 } },
+      xaxis: {
+        ...axis,
+        ...(counts && { dtick: Math.max(1, Math.ceil((lines[0]?.x.length ?? 0) / MOST_COUNTS)) }),
+        title: { text: xTitle, standoff: 6 },
+      },
       yaxis: {
         ...axis,
         type: log ? 'log' : 'linear',
