@@ -39,7 +39,9 @@ export interface Tolerance {
 
 /** The inner iteration ends when it changes by this part of the tolerance; doses are kept exactly at every sweep. */
 const CLOSE_ENOUGH = 0.05;
-const MOST_SWEEPS = 25;
+const MOST_SWEEPS = 40;
+/** Of the way to the next iterate. */
+const SMALLEST_PART = 1 / 16;
 /** In units of the limit; below, all is dissolved to 1e-7. */
 const NEGLIGIBLE = 0.08;
 
@@ -89,16 +91,20 @@ export class DiffusionSystem {
   ): Float64Array[] | null {
     let now: readonly Float64Array[] = guess;
     let changeBefore = Number.POSITIVE_INFINITY;
-    let isSlow = false;
+    let part = 1;
     for (let sweep = 0; sweep < MOST_SWEEPS; sweep++) {
       this.#findCarriers(species, now, conditions);
       const next = species.map((each, k) => this.#solve(each, before[k], now[k], time, conditions, k));
       const change = differenceOf(this.depth, now, next, tolerance);
       if (change < CLOSE_ENOUGH) return next;
-      // The field of a dopant's own carriers answers a change with the opposite one: the mean of both settles at once.
-      isSlow ||= change > changeBefore / 2;
+      // The field of a dopant's own carriers answers a change with the opposite one, that of dense dopants that cancel with a larger one:
+      // a part of the way, smaller where that does not help, settles at once.
+      if (change > changeBefore * (part === 1 ? 0.5 : 0.9)) part = Math.max(SMALLEST_PART, part / 2);
       changeBefore = change;
-      now = isSlow ? now.map((column, k) => column.map((value, i) => (value + next[k][i]) / 2)) : next;
+      now =
+        part === 1
+          ? next
+          : now.map((column, k) => column.map((value, i) => value + part * (next[k][i] - value)));
     }
     return null;
   }
